@@ -1,0 +1,2 @@
+/** Mass, geometry, roll, aerodynamics and brakes of a car, and the wheel loads that follow. */
+package rampwright.vehicle.chassis;
