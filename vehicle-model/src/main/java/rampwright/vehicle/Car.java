@@ -32,9 +32,21 @@ public record Car(
     double frontRadius,
     double rearRadius) {
   public static final Quantity FRONT_RADIUS =
-      Quantity.si("front_rolling_radius_m", "front rolling radius", "m", 0.05, 2, "the value is in millimetres");
+      Quantity.si(
+          "front_rolling_radius_m",
+          "front rolling radius",
+          "m",
+          0.05,
+          2,
+          "the value is in millimetres");
   public static final Quantity REAR_RADIUS =
-      Quantity.si("rear_rolling_radius_m", "rear rolling radius", "m", 0.05, 2, "the value is in millimetres");
+      Quantity.si(
+          "rear_rolling_radius_m",
+          "rear rolling radius",
+          "m",
+          0.05,
+          2,
+          "the value is in millimetres");
 
   /** Checks the radii and the name. */
   public Car {

@@ -15,10 +15,12 @@ public record Conditions(
     double grip, double fuelMass, double airDensity, double windSpeed, double windFrom) {
   public static final Quantity GRIP =
       Quantity.si("grip", "grip factor", "", 0.05, 2, "it was given in percent");
-  public static final Quantity FUEL_MASS = Quantity.si("fuel_mass_kg", "fuel mass", "kg", 0, 500, "");
+  public static final Quantity FUEL_MASS =
+      Quantity.si("fuel_mass_kg", "fuel mass", "kg", 0, 500, "");
   public static final Quantity AIR_DENSITY =
       Quantity.si("air_density_kgpm3", "air density", "kg/m³", 0, 2, "");
-  public static final Quantity WIND_SPEED = Quantity.si("wind_speed_mps", "wind speed", "m/s", 0, 40, "");
+  public static final Quantity WIND_SPEED =
+      Quantity.si("wind_speed_mps", "wind speed", "m/s", 0, 40, "");
   public static final Quantity WIND_FROM =
       Quantity.degrees("wind_from_deg", "wind direction", -360, 360, "");
 

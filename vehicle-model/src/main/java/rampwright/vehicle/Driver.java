@@ -23,7 +23,8 @@ public record Driver(double powerGrowth, double brakingGrowth) {
   public static final Quantity POWER_GROWTH =
       Quantity.si("power_growth_1ps", "largest slide growth rate on power", "1/s", -20, 50, "");
   public static final Quantity BRAKING_GROWTH =
-      Quantity.si("braking_growth_1ps", "largest slide growth rate when braking", "1/s", -20, 50, "");
+      Quantity.si(
+          "braking_growth_1ps", "largest slide growth rate when braking", "1/s", -20, 50, "");
 
   public static final Driver CAUTIOUS = new Driver(0, 1);
   public static final Driver QUICK = new Driver(1, 2);

@@ -9,7 +9,8 @@ import picocli.CommandLine.Spec;
 @Command(
     name = "rampwright",
     mixinStandardHelpOptions = true,
-    description = "Finds preload, ramp angles and plate count of a plate-type limited-slip differential.")
+    description =
+        "Finds preload, ramp angles and plate count of a plate-type limited-slip differential.")
 public final class Rampwright implements Runnable {
   @Spec private CommandSpec spec;
 

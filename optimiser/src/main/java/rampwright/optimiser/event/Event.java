@@ -56,7 +56,11 @@ public record Event(
       }
     }
     if (!names.contains(currentSetting)) {
-      throw InvalidInput.of("current setting", String.valueOf(currentSetting), "one of the event's settings: " + settings.stream().map(NamedSetting::name).toList(), "");
+      throw InvalidInput.of(
+          "current setting",
+          String.valueOf(currentSetting),
+          "one of the event's settings: " + settings.stream().map(NamedSetting::name).toList(),
+          "");
     }
   }
 
@@ -72,7 +76,10 @@ public record Event(
         .orElseThrow(
             () ->
                 InvalidInput.of(
-                    "setting", wanted, "one of the event's: " + settings.stream().map(NamedSetting::name).toList(), ""));
+                    "setting",
+                    wanted,
+                    "one of the event's: " + settings.stream().map(NamedSetting::name).toList(),
+                    ""));
   }
 
   /** Returns the setting that is in the car now. */

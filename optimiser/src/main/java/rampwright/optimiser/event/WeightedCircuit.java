@@ -10,7 +10,8 @@ import rampwright.vehicle.input.Quantity;
  * @param weight factor on its lap time in the objective (-)
  */
 public record WeightedCircuit(Circuit circuit, double weight) {
-  public static final Quantity WEIGHT = Quantity.si("weight", "weight of a circuit", "", 0, 1000, "");
+  public static final Quantity WEIGHT =
+      Quantity.si("weight", "weight of a circuit", "", 0, 1000, "");
 
   /** Checks the weight. */
   public WeightedCircuit {

@@ -45,7 +45,12 @@ public record PartsKit(
       PlateDifferential.PRELOAD.check(max);
       STEP.check(step);
       if (max < min) {
-        throw InvalidInput.value("largest preload", max, "N·m", "at least the smallest preload of " + min + " N·m", "the two were swapped");
+        throw InvalidInput.value(
+            "largest preload",
+            max,
+            "N·m",
+            "at least the smallest preload of " + min + " N·m",
+            "the two were swapped");
       }
     }
 
@@ -93,7 +98,11 @@ public record PartsKit(
     Set<String> names = new HashSet<>();
     for (RingSet set : ringSets) {
       if (!names.add(set.name())) {
-        throw InvalidInput.of("name of a ring set", set.name(), "unique in the kit", "add a number to one of the two");
+        throw InvalidInput.of(
+            "name of a ring set",
+            set.name(),
+            "unique in the kit",
+            "add a number to one of the two");
       }
     }
     if (facesPerSide.isEmpty()) {
@@ -102,7 +111,12 @@ public record PartsKit(
     for (int i = 0; i < facesPerSide.size(); i++) {
       PlateBuild.FACES_PER_SIDE.check(facesPerSide.get(i));
       if (i > 0 && facesPerSide.get(i) <= facesPerSide.get(i - 1)) {
-        throw InvalidInput.value("number of faces per side", facesPerSide.get(i), "", "above the number before it", "sort the list");
+        throw InvalidInput.value(
+            "number of faces per side",
+            facesPerSide.get(i),
+            "",
+            "above the number before it",
+            "sort the list");
       }
     }
   }
@@ -119,7 +133,10 @@ public record PartsKit(
         .orElseThrow(
             () ->
                 InvalidInput.of(
-                    "ring set", wanted, "one of the kit's: " + ringSets.stream().map(RingSet::name).toList(), ""));
+                    "ring set",
+                    wanted,
+                    "one of the kit's: " + ringSets.stream().map(RingSet::name).toList(),
+                    ""));
   }
 
   /**
@@ -129,16 +146,28 @@ public record PartsKit(
    */
   public PlateBuild build(KitSetting setting) {
     if (!facesPerSide.contains(setting.facesPerSide())) {
-      throw InvalidInput.value("number of faces per side", setting.facesPerSide(), "", "one of the kit's: " + facesPerSide, "");
+      throw InvalidInput.value(
+          "number of faces per side",
+          setting.facesPerSide(),
+          "",
+          "one of the kit's: " + facesPerSide,
+          "");
     }
     double steps = (setting.preload() - preload.min()) / preload.step();
     boolean onStep = Math.abs(steps - Math.rint(steps)) < 1e-6;
     if (!onStep || steps < -1e-6 || Math.rint(steps) >= preload.count()) {
       throw InvalidInput.value(
-          PlateDifferential.PRELOAD.label(), setting.preload(), "N·m",
-          "from " + preload.min() + " to " + preload.max() + " in steps of " + preload.step(), "");
+          PlateDifferential.PRELOAD.label(),
+          setting.preload(),
+          "N·m",
+          "from " + preload.min() + " to " + preload.max() + " in steps of " + preload.step(),
+          "");
     }
     return new PlateBuild(
-        hardware, ringSet(setting.ringSet()), setting.turned(), setting.facesPerSide(), setting.preload());
+        hardware,
+        ringSet(setting.ringSet()),
+        setting.turned(),
+        setting.facesPerSide(),
+        setting.preload());
   }
 }

@@ -11,7 +11,8 @@ import rampwright.vehicle.input.Quantity;
  * @param downforceAreaRear downforce coefficient times area at the rear axle (m²)
  */
 public record Aero(double dragArea, double downforceAreaFront, double downforceAreaRear) {
-  public static final Quantity DRAG_AREA = Quantity.si("drag_area_m2", "drag area", "m²", 0, 20, "");
+  public static final Quantity DRAG_AREA =
+      Quantity.si("drag_area_m2", "drag area", "m²", 0, 20, "");
   public static final Quantity DOWNFORCE_FRONT =
       Quantity.si("downforce_area_front_m2", "front downforce area", "m²", -5, 20, "");
   public static final Quantity DOWNFORCE_REAR =

@@ -10,7 +10,8 @@ import rampwright.vehicle.input.Quantity;
  */
 public record Brakes(double frontShare, double maxTorque) {
   public static final Quantity FRONT_SHARE =
-      Quantity.si("brake_front_share", "front share of brake torque", "", 0, 1, "it was given in percent");
+      Quantity.si(
+          "brake_front_share", "front share of brake torque", "", 0, 1, "it was given in percent");
   public static final Quantity MAX_TORQUE =
       Quantity.si("brake_max_torque_nm", "largest total brake torque", "N·m", 0, 1e6, "");
 

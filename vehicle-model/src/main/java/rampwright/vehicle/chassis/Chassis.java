@@ -31,11 +31,14 @@ public record Chassis(
   public static final Quantity MASS = Quantity.si("mass_kg", "mass", "kg", 50, 20000, "");
   public static final Quantity YAW_INERTIA =
       Quantity.si("yaw_inertia_kgm2", "yaw inertia", "kg·m²", 5, 200000, "");
-  public static final Quantity WHEELBASE = Quantity.si("wheelbase_m", "wheelbase", "m", 0.8, 8, "the value is in millimetres");
+  public static final Quantity WHEELBASE =
+      Quantity.si("wheelbase_m", "wheelbase", "m", 0.8, 8, "the value is in millimetres");
   public static final Quantity CG_TO_FRONT_AXLE =
-      Quantity.si("cg_to_front_axle_m", "distance from front axle to centre of gravity", "m", 0.1, 8, "");
+      Quantity.si(
+          "cg_to_front_axle_m", "distance from front axle to centre of gravity", "m", 0.1, 8, "");
   public static final Quantity CG_HEIGHT =
-      Quantity.si("cg_height_m", "centre of gravity height", "m", 0, 2, "the value is in millimetres");
+      Quantity.si(
+          "cg_height_m", "centre of gravity height", "m", 0, 2, "the value is in millimetres");
   public static final Quantity TRACK_FRONT =
       Quantity.si("track_front_m", "front track", "m", 0.5, 10, "the value is in millimetres");
   public static final Quantity TRACK_REAR =
@@ -45,7 +48,8 @@ public record Chassis(
   public static final Quantity ROLL_CENTRE_REAR =
       Quantity.si("roll_centre_rear_m", "rear roll centre height", "m", -0.5, 1.5, "");
   public static final Quantity FRONT_ROLL_SHARE =
-      Quantity.si("front_roll_share", "front share of roll stiffness", "", 0, 1, "it was given in percent");
+      Quantity.si(
+          "front_roll_share", "front share of roll stiffness", "", 0, 1, "it was given in percent");
 
   /**
    * Checks every value.
@@ -66,7 +70,11 @@ public record Chassis(
     FRONT_ROLL_SHARE.check(frontRollShare);
     if (cgToFrontAxle >= wheelbase) {
       throw InvalidInput.value(
-          CG_TO_FRONT_AXLE.label(), cgToFrontAxle, "m", "less than the wheelbase of " + wheelbase + " m", "");
+          CG_TO_FRONT_AXLE.label(),
+          cgToFrontAxle,
+          "m",
+          "less than the wheelbase of " + wheelbase + " m",
+          "");
     }
   }
 
@@ -78,7 +86,15 @@ public record Chassis(
   /** Returns this chassis with more mass at the centre of gravity (fuel); inertia is unchanged. */
   public Chassis withAddedMass(double added) {
     return new Chassis(
-        mass + added, yawInertia, wheelbase, cgToFrontAxle, cgHeight, trackFront, trackRear,
-        rollCentreFront, rollCentreRear, frontRollShare);
+        mass + added,
+        yawInertia,
+        wheelbase,
+        cgToFrontAxle,
+        cgHeight,
+        trackFront,
+        trackRear,
+        rollCentreFront,
+        rollCentreRear,
+        frontRollShare);
   }
 }

@@ -25,7 +25,8 @@ public record Station(
     double gripRight) {
   public static final Quantity DISTANCE = Quantity.si("distance_m", "distance", "m", 0, 1e6, "");
   public static final Quantity CURVATURE =
-      Quantity.si("curvature_1pm", "curvature", "1/m", -0.5, 0.5, "the column holds radii in metres");
+      Quantity.si(
+          "curvature_1pm", "curvature", "1/m", -0.5, 0.5, "the column holds radii in metres");
   public static final Quantity POSITION = Quantity.si("x_m", "position", "m", -1e7, 1e7, "");
   public static final Quantity GRADE = Quantity.degrees("grade_deg", "grade", -30, 30, "");
   public static final Quantity BANK = Quantity.degrees("bank_deg", "bank", -50, 50, "");

@@ -14,7 +14,9 @@ package rampwright.vehicle.differential;
  * (rad/s) and {@code D} then the torque of the right (rear) output minus the other's.
  */
 public sealed interface Differential permits OpenDifferential, Spool, PlateDifferential {
-  /** Returns the largest friction torque difference (N·m) at a cage torque; infinite for a spool. */
+  /**
+   * Returns the largest friction torque difference (N·m) at a cage torque; infinite for a spool.
+   */
   double capacity(double cageTorque);
 
   /** Returns the derivative of the capacity with cage torque (-). */

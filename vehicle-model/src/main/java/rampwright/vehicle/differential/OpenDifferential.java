@@ -10,7 +10,8 @@ import rampwright.vehicle.input.Quantity;
  */
 public record OpenDifferential(double frictionShare) implements Differential {
   public static final Quantity FRICTION_SHARE =
-      Quantity.si("friction_share", "inherent friction share", "", 0, 0.5, "it was given in percent");
+      Quantity.si(
+          "friction_share", "inherent friction share", "", 0, 0.5, "it was given in percent");
 
   /** The ideal, frictionless unit. */
   public static final OpenDifferential IDEAL = new OpenDifferential(0);

@@ -36,7 +36,10 @@ public record PlateBuild(
     PlateDifferential.PRELOAD.check(preload);
     if (turned && !ringSet.reversible()) {
       throw InvalidInput.of(
-          "ring set " + ringSet.name(), "turned", "fitted the normal way, it cannot be turned round", "");
+          "ring set " + ringSet.name(),
+          "turned",
+          "fitted the normal way, it cannot be turned round",
+          "");
     }
   }
 
@@ -80,7 +83,9 @@ public record PlateBuild(
     if (flank >= Math.PI / 2) {
       return 0;
     }
-    return facesPerSide * hardware.plateFriction() * hardware.effectiveRadius()
+    return facesPerSide
+        * hardware.plateFriction()
+        * hardware.effectiveRadius()
         / (hardware.rampRadius() * Math.tan(flank));
   }
 }

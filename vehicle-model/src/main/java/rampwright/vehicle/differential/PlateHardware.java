@@ -43,8 +43,11 @@ public record PlateHardware(
     }
     if (plateInnerRadius >= plateOuterRadius) {
       throw InvalidInput.value(
-          INNER_RADIUS.label(), plateInnerRadius * 1e3, "mm",
-          "less than the outer radius of " + plateOuterRadius * 1e3 + " mm", "the two were swapped");
+          INNER_RADIUS.label(),
+          plateInnerRadius * 1e3,
+          "mm",
+          "less than the outer radius of " + plateOuterRadius * 1e3 + " mm",
+          "the two were swapped");
     }
   }
 

@@ -15,14 +15,25 @@ import rampwright.vehicle.input.Quantity;
  */
 public record RingSet(String name, double driveAngle, double coastAngle, boolean reversible) {
   public static final Quantity DRIVE_ANGLE =
-      Quantity.degrees("drive_angle_deg", "drive ramp angle", 15, 90, "the angle was measured from the axle: use 90 minus it");
+      Quantity.degrees(
+          "drive_angle_deg",
+          "drive ramp angle",
+          15,
+          90,
+          "the angle was measured from the axle: use 90 minus it");
   public static final Quantity COAST_ANGLE =
-      Quantity.degrees("coast_angle_deg", "coast ramp angle", 15, 90, "the angle was measured from the axle: use 90 minus it");
+      Quantity.degrees(
+          "coast_angle_deg",
+          "coast ramp angle",
+          15,
+          90,
+          "the angle was measured from the axle: use 90 minus it");
 
   /** Checks the name and both angles. */
   public RingSet {
     if (name == null || name.isBlank()) {
-      throw InvalidInput.of("name of a ring set", "blank", "some text", "use the stamp on the part");
+      throw InvalidInput.of(
+          "name of a ring set", "blank", "some text", "use the stamp on the part");
     }
     DRIVE_ANGLE.check(driveAngle);
     COAST_ANGLE.check(coastAngle);

@@ -24,14 +24,22 @@ public record Driveline(
     double shiftTime,
     DriveLayout layout,
     double frontTorqueShare) {
-  public static final Quantity GEAR_RATIO = Quantity.si("gear_ratios", "gear ratio", "", 0.1, 30, "");
-  public static final Quantity FINAL_DRIVE = Quantity.si("final_drive", "final drive ratio", "", 0.5, 20, "");
+  public static final Quantity GEAR_RATIO =
+      Quantity.si("gear_ratios", "gear ratio", "", 0.1, 30, "");
+  public static final Quantity FINAL_DRIVE =
+      Quantity.si("final_drive", "final drive ratio", "", 0.5, 20, "");
   public static final Quantity EFFICIENCY =
       Quantity.si("efficiency", "driveline efficiency", "", 0.3, 1, "it was given in percent");
   public static final Quantity SHIFT_TIME =
       Quantity.si("shift_time_s", "shift time", "s", 0, 2, "the value is in milliseconds");
   public static final Quantity FRONT_TORQUE_SHARE =
-      Quantity.si("front_torque_share", "front share of the centre differential", "", 0, 1, "it was given in percent");
+      Quantity.si(
+          "front_torque_share",
+          "front share of the centre differential",
+          "",
+          0,
+          1,
+          "it was given in percent");
 
   /** Checks every value and that the ratios fall from gear to gear. */
   public Driveline {
@@ -43,7 +51,11 @@ public record Driveline(
       GEAR_RATIO.check(gearRatios.get(i));
       if (i > 0 && gearRatios.get(i) >= gearRatios.get(i - 1)) {
         throw InvalidInput.value(
-            "ratio of gear " + (i + 1), gearRatios.get(i), "", "below that of the gear before it", "list first gear first");
+            "ratio of gear " + (i + 1),
+            gearRatios.get(i),
+            "",
+            "below that of the gear before it",
+            "list first gear first");
       }
     }
     FINAL_DRIVE.check(finalDrive);

@@ -19,12 +19,14 @@ public record Engine(TorqueCurve fullLoad, TorqueCurve overrun, double revLimit)
     REV_LIMIT.check(revLimit);
     for (TorqueCurve.Point p : overrun.points()) {
       if (p.torque() > 0) {
-        throw InvalidInput.value("overrun torque", p.torque(), "N·m", "not above 0", "the sign was left out");
+        throw InvalidInput.value(
+            "overrun torque", p.torque(), "N·m", "not above 0", "the sign was left out");
       }
     }
     for (TorqueCurve.Point p : fullLoad.points()) {
       if (p.speed() <= revLimit && p.torque() <= 0) {
-        throw InvalidInput.value("full-load torque", p.torque(), "N·m", "above 0 up to the rev limit", "");
+        throw InvalidInput.value(
+            "full-load torque", p.torque(), "N·m", "above 0 up to the rev limit", "");
       }
     }
   }

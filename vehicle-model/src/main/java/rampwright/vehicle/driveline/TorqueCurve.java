@@ -18,8 +18,16 @@ public record TorqueCurve(List<Point> points) {
   public record Point(double speed, double torque) {
     /** Rejects values that are no numbers and negative speeds. */
     public Point {
-      if (!(speed >= 0) || Double.isInfinite(speed) || Double.isNaN(torque) || Double.isInfinite(torque)) {
-        throw InvalidInput.value("engine speed of a torque point", speed, "rad/s", "a number not below 0 with a finite torque", "");
+      if (!(speed >= 0)
+          || Double.isInfinite(speed)
+          || Double.isNaN(torque)
+          || Double.isInfinite(torque)) {
+        throw InvalidInput.value(
+            "engine speed of a torque point",
+            speed,
+            "rad/s",
+            "a number not below 0 with a finite torque",
+            "");
       }
     }
   }
@@ -33,8 +41,11 @@ public record TorqueCurve(List<Point> points) {
     for (int i = 1; i < points.size(); i++) {
       if (points.get(i).speed() <= points.get(i - 1).speed()) {
         throw InvalidInput.value(
-            "engine speed of torque point " + (i + 1), points.get(i).speed(), "rad/s",
-            "above that of the point before it", "sort the points by speed");
+            "engine speed of torque point " + (i + 1),
+            points.get(i).speed(),
+            "rad/s",
+            "above that of the point before it",
+            "sort the points by speed");
       }
     }
   }

@@ -29,7 +29,8 @@ public final class InvalidInput extends IllegalArgumentException {
   /** Returns the error for any value already turned into text. */
   public static InvalidInput of(String name, String value, String rule, String advice) {
     String tail = advice.isEmpty() ? "" : " Maybe " + advice + ".";
-    return new InvalidInput("", "The " + name + " (" + value + ") must be " + rule + "." + tail, null);
+    return new InvalidInput(
+        "", "The " + name + " (" + value + ") must be " + rule + "." + tail, null);
   }
 
   /** Returns the error with a complete message of its own (for faults that have no one value). */
@@ -37,7 +38,9 @@ public final class InvalidInput extends IllegalArgumentException {
     return new InvalidInput("", message, null);
   }
 
-  /** Returns this error with the place (file, line, key path) in front; the outermost comes first. */
+  /**
+   * Returns this error with the place (file, line, key path) in front; the outermost comes first.
+   */
   public InvalidInput at(String place) {
     return new InvalidInput(where.isEmpty() ? place : place + ": " + where, what, this);
   }
@@ -59,6 +62,8 @@ public final class InvalidInput extends IllegalArgumentException {
     if (value == Math.rint(value) && Math.abs(value) < 1e9) {
       return Long.toString((long) value);
     }
-    return String.format(Locale.ROOT, "%.6g", value).replaceFirst("(\\.\\d*?)0+(?=$|e)", "$1").replaceFirst("\\.$", "");
+    return String.format(Locale.ROOT, "%.6g", value)
+        .replaceFirst("(\\.\\d*?)0+(?=$|e)", "$1")
+        .replaceFirst("\\.$", "");
   }
 }

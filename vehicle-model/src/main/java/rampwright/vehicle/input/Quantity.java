@@ -15,7 +15,13 @@ import java.util.Locale;
  * @param advice what may help when the value is out of range; may be empty
  */
 public record Quantity(
-    String key, String label, String unit, double siPerUnit, double min, double max, String advice) {
+    String key,
+    String label,
+    String unit,
+    double siPerUnit,
+    double min,
+    double max,
+    String advice) {
 
   /** Rejects a range that is empty or not a number. */
   public Quantity {
@@ -31,8 +37,7 @@ public record Quantity(
   }
 
   /** Returns an angle that people see in degrees. */
-  public static Quantity degrees(
-      String key, String label, double min, double max, String advice) {
+  public static Quantity degrees(String key, String label, double min, double max, String advice) {
     return new Quantity(key, label, "deg", Math.PI / 180, min, max, advice);
   }
 
