@@ -1,0 +1,4 @@
+package rampwright.planted.web;
+
+/** Stands for the module above the optimiser. */
+public final class PlantedPage {}
