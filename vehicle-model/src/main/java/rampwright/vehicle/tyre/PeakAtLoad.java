@@ -13,7 +13,8 @@ import rampwright.vehicle.input.Quantity;
  */
 public record PeakAtLoad(
     double load, double frictionX, double frictionY, double slip, double slipAngle) {
-  public static final Quantity LOAD = Quantity.si("load_n", "tyre load", "N", 1, 1e6, "the value is in kN");
+  public static final Quantity LOAD =
+      Quantity.si("load_n", "tyre load", "N", 1, 1e6, "the value is in kN");
   public static final Quantity FRICTION_X =
       Quantity.si("peak_friction_x", "peak longitudinal friction", "", 0.05, 5, "");
   public static final Quantity FRICTION_Y =
@@ -21,7 +22,8 @@ public record PeakAtLoad(
   public static final Quantity SLIP =
       Quantity.si("slip_at_peak", "slip at peak", "", 0.02, 0.6, "it was given in percent");
   public static final Quantity SLIP_ANGLE =
-      Quantity.degrees("slip_angle_at_peak_deg", "slip angle at peak", 1.2, 40, "it was given in radians");
+      Quantity.degrees(
+          "slip_angle_at_peak_deg", "slip angle at peak", 1.2, 40, "it was given in radians");
 
   /** Checks every value. */
   public PeakAtLoad {

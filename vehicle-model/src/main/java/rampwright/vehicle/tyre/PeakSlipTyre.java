@@ -15,11 +15,11 @@ import rampwright.vehicle.input.InvalidInput;
  * friction is not below {@link #LEAST_FRICTION} and slip at the peak not below {@link #LEAST_SLIP}.
  * No camber, no aligning moment, no shift of the curves at zero slip.
  *
- * <p>Source: Kelly, <i>Lap Time Simulation with Transient Vehicle and Tyre Dynamics</i>, PhD thesis,
- * Cranfield 2008; Perantoni and Limebeer, <i>Optimal control for a Formula One car with variable
- * parameters</i>, Vehicle System Dynamics 52(5), 2014, Appendix A. Deviation: with {@link
- * SlipCurve#peakAtOne} the peak lies at the entered slip exactly; the paper's transcriptions peak at
- * 0.751 of it.
+ * <p>Source: Kelly, <i>Lap Time Simulation with Transient Vehicle and Tyre Dynamics</i>, PhD
+ * thesis, Cranfield 2008; Perantoni and Limebeer, <i>Optimal control for a Formula One car with
+ * variable parameters</i>, Vehicle System Dynamics 52(5), 2014, Appendix A. Deviation: with {@link
+ * SlipCurve#peakAtOne} the peak lies at the entered slip exactly; the paper's transcriptions peak
+ * at 0.751 of it.
  *
  * @param light the peaks at the smaller load
  * @param heavy the peaks at the larger load
@@ -27,8 +27,7 @@ import rampwright.vehicle.input.InvalidInput;
  * @param lateral shape of the lateral force
  */
 public record PeakSlipTyre(
-    PeakAtLoad light, PeakAtLoad heavy, SlipCurve longitudinal, SlipCurve lateral)
-    implements Tyre {
+    PeakAtLoad light, PeakAtLoad heavy, SlipCurve longitudinal, SlipCurve lateral) implements Tyre {
   /** Friction never falls below this value, whatever the load (-). */
   public static final double LEAST_FRICTION = 0.2;
 
@@ -42,7 +41,11 @@ public record PeakSlipTyre(
   public PeakSlipTyre {
     if (!(heavy.load() > light.load())) {
       throw InvalidInput.value(
-          "second tyre load", heavy.load(), "N", "above the first load of " + light.load() + " N", "the two were swapped");
+          "second tyre load",
+          heavy.load(),
+          "N",
+          "above the first load of " + light.load() + " N",
+          "the two were swapped");
     }
   }
 
@@ -53,7 +56,8 @@ public record PeakSlipTyre(
 
   @Override
   public double slipAngleAtPeak(double load) {
-    return lateral.peak() * Math.max(LEAST_SLIP, linear(light.slipAngle(), heavy.slipAngle(), load));
+    return lateral.peak()
+        * Math.max(LEAST_SLIP, linear(light.slipAngle(), heavy.slipAngle(), load));
   }
 
   @Override
@@ -90,7 +94,8 @@ public record PeakSlipTyre(
     double rho2 = sn * sn + an * an;
     double rho = Math.sqrt(rho2);
 
-    // g = sin(Q atan(S rho))/rho and h = (dg/drho)/rho, so that F = mu Fz g n, dF/dn = mu Fz (g + h n²)
+    // g = sin(Q atan(S rho))/rho and h = (dg/drho)/rho, so that F = mu Fz g n, dF/dn = mu Fz (g + h
+    // n²)
     double gX;
     double hX;
     double gY;
