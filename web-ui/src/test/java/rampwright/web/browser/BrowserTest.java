@@ -7,9 +7,6 @@ import com.microsoft.playwright.BrowserContext;
 import com.microsoft.playwright.BrowserType;
 import com.microsoft.playwright.Page;
 import com.microsoft.playwright.Playwright;
-import java.net.URI;
-import java.util.List;
-import java.util.concurrent.CopyOnWriteArrayList;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeAll;
@@ -29,11 +26,9 @@ abstract class BrowserTest {
   private static Playwright playwright;
   private static Browser browser;
 
-  private final List<String> foreignRequests = new CopyOnWriteArrayList<>();
-  private final List<String> scriptErrors = new CopyOnWriteArrayList<>();
-
   @LocalServerPort private int port;
   private BrowserContext context;
+  private PageGuard guard;
 
   /** The page of the running test. */
   protected Page page;
@@ -60,15 +55,13 @@ abstract class BrowserTest {
   void openPage() {
     context = browser.newContext(new Browser.NewContextOptions().setViewportSize(1440, 900));
     page = context.newPage();
-    page.onRequest(request -> noteForeign(request.url()));
-    page.onPageError(scriptErrors::add);
+    guard = new PageGuard(page);
   }
 
   @AfterEach
   void closePage() {
     context.close();
-    assertThat(foreignRequests).as("requests to other hosts").isEmpty();
-    assertThat(scriptErrors).as("errors of scripts").isEmpty();
+    assertThat(guard.problems()).as("problems on the page").isEmpty();
   }
 
   /**
@@ -79,13 +72,7 @@ abstract class BrowserTest {
   protected void open(String path) {
     page.navigate("http://127.0.0.1:" + port + "/" + path);
     page.waitForFunction(
-        "() => !window.Vaadin?.Flow?.clients || Object.values(window.Vaadin.Flow.clients).every(c => !c.isActive || !c.isActive())");
-  }
-
-  private void noteForeign(String url) {
-    String host = URI.create(url).getHost();
-    if (host != null && !host.equals("127.0.0.1")) {
-      foreignRequests.add(url);
-    }
+        "() => window.Vaadin?.Flow?.clients"
+            + " && Object.values(Vaadin.Flow.clients).every(c => !c.isActive?.())");
   }
 }
