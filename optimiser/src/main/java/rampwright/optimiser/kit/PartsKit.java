@@ -36,22 +36,29 @@ public record PartsKit(
    * @param step change of one shim step (N·m)
    */
   public record PreloadRange(double min, double max, double step) {
+    public static final Quantity MIN = preload("preload_min_nm", "smallest preload");
+    public static final Quantity MAX = preload("preload_max_nm", "largest preload");
     public static final Quantity STEP =
         Quantity.si("preload_step_nm", "preload step", "N·m", 0.1, 1000, "");
 
     /** Checks the range. */
     public PreloadRange {
-      PlateDifferential.PRELOAD.check(min);
-      PlateDifferential.PRELOAD.check(max);
+      MIN.check(min);
+      MAX.check(max);
       STEP.check(step);
       if (max < min) {
         throw InvalidInput.value(
-            "largest preload",
+            MAX.label(),
             max,
             "N·m",
             "at least the smallest preload of " + min + " N·m",
             "the two were swapped");
       }
+    }
+
+    private static Quantity preload(String key, String label) {
+      Quantity whole = PlateDifferential.PRELOAD;
+      return Quantity.si(key, label, whole.unit(), whole.min(), whole.max(), whole.advice());
     }
 
     /** Returns the number of preloads. */

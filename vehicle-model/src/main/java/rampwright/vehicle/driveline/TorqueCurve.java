@@ -2,6 +2,7 @@ package rampwright.vehicle.driveline;
 
 import java.util.List;
 import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.input.Quantity;
 
 /**
  * Engine torque over engine speed, linear between its points and constant beyond them.
@@ -16,19 +17,15 @@ public record TorqueCurve(List<Point> points) {
    * @param torque crankshaft torque (N·m), negative on overrun
    */
   public record Point(double speed, double torque) {
-    /** Rejects values that are no numbers and negative speeds. */
+    public static final Quantity SPEED =
+        new Quantity("rpm", "engine speed of a torque point", "rpm", Math.PI / 30, 0, 40000, "");
+    public static final Quantity TORQUE =
+        Quantity.si("nm", "engine torque", "N·m", -20000, 20000, "");
+
+    /** Checks both values. */
     public Point {
-      if (!(speed >= 0)
-          || Double.isInfinite(speed)
-          || Double.isNaN(torque)
-          || Double.isInfinite(torque)) {
-        throw InvalidInput.value(
-            "engine speed of a torque point",
-            speed,
-            "rad/s",
-            "a number not below 0 with a finite torque",
-            "");
-      }
+      SPEED.check(speed);
+      TORQUE.check(torque);
     }
   }
 
@@ -42,8 +39,8 @@ public record TorqueCurve(List<Point> points) {
       if (points.get(i).speed() <= points.get(i - 1).speed()) {
         throw InvalidInput.value(
             "engine speed of torque point " + (i + 1),
-            points.get(i).speed(),
-            "rad/s",
+            points.get(i).speed() / Point.SPEED.siPerUnit(),
+            Point.SPEED.unit(),
             "above that of the point before it",
             "sort the points by speed");
       }
