@@ -2,7 +2,9 @@ package rampwright.optimiser.event;
 
 import java.util.Optional;
 import rampwright.optimiser.kit.KitSetting;
+import rampwright.optimiser.kit.PartsKit;
 import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.input.InvalidInput;
 
 /**
  * A setting that people talk about.
@@ -13,4 +15,14 @@ import rampwright.vehicle.differential.DifferentialSet;
  * @param differentials the laws that the lap sees
  */
 public record NamedSetting(
-    String name, Optional<KitSetting> kitSetting, DifferentialSet differentials) {}
+    String name, Optional<KitSetting> kitSetting, DifferentialSet differentials) {
+  /**
+   * Returns a setting built from the kit, in the rear axle.
+   *
+   * @throws InvalidInput when the kit cannot build it
+   */
+  public static NamedSetting of(String name, PartsKit kit, KitSetting setting) {
+    return new NamedSetting(
+        name, Optional.of(setting), DifferentialSet.rear(kit.build(setting).law()));
+  }
+}

@@ -73,7 +73,7 @@ class KitFileTest {
             "face_pressure: uniform_wear ",
             "face_pressure: even ",
             "k.yaml:10: hardware.face_pressure: The face pressure (even) must be one of:"
-                + " uniform_wear, uniform_pressure."));
+                + " uniform_pressure, uniform_wear."));
   }
 
   @ParameterizedTest

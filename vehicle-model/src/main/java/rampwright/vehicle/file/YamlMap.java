@@ -1,5 +1,6 @@
 package rampwright.vehicle.file;
 
+import java.util.Collections;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Supplier;
@@ -23,7 +24,7 @@ public final class YamlMap {
 
   /** Returns the keys with their values in the order of the file. */
   public Map<String, YamlNode> entries() {
-    return Map.copyOf(entries);
+    return Collections.unmodifiableMap(entries);
   }
 
   /** Returns the value of a key, empty when the key is missing. */

@@ -1,7 +1,6 @@
 package rampwright.vehicle.file;
 
 import java.util.Collection;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -103,6 +102,18 @@ public final class YamlNode {
   }
 
   /**
+   * Returns the value of one key of a group whose other keys depend on it.
+   *
+   * @throws InvalidInput when this is no group or the key is missing
+   */
+  public YamlNode peek(String key) {
+    if (entries == null) {
+      throw fault(named(), shown(), "a group of keys", "");
+    }
+    return new YamlMap(this, entries).get(key);
+  }
+
+  /**
    * Returns the items of a list.
    *
    * @throws InvalidInput when this is no list
@@ -174,9 +185,10 @@ public final class YamlNode {
   public <T> T choice(Map<String, T> values) {
     T value = text == null ? null : values.get(text);
     if (value == null) {
+      List<String> names = values.keySet().stream().sorted().toList();
       String advice =
-          Suggestion.nearest(shown(), values.keySet()).map(near -> "you meant " + near).orElse("");
-      throw fault(named(), shown(), "one of: " + String.join(", ", values.keySet()), advice);
+          Suggestion.nearest(shown(), names).map(near -> "you meant " + near).orElse("");
+      throw fault(named(), shown(), "one of: " + String.join(", ", names), advice);
     }
     return value;
   }
@@ -198,9 +210,7 @@ public final class YamlNode {
   /** Returns the names of an enum's constants, in lower case, with their values. */
   public static <E extends Enum<E>> Map<String, E> names(Class<E> type) {
     return Stream.of(type.getEnumConstants())
-        .collect(
-            Collectors.toMap(
-                e -> e.name().toLowerCase(Locale.ROOT), e -> e, (a, b) -> a, LinkedHashMap::new));
+        .collect(Collectors.toMap(e -> e.name().toLowerCase(Locale.ROOT), e -> e));
   }
 
   private String named() {

@@ -74,7 +74,7 @@ class CarFileTest {
         arguments(
             "layout: rear ",
             "layout: raer ",
-            "c.yaml:26: driveline.layout: The layout (raer) must be one of: rear, front, all."
+            "c.yaml:26: driveline.layout: The layout (raer) must be one of: all, front, rear."
                 + " Maybe you meant rear."),
         arguments(
             "[2.92, 2.16,",
