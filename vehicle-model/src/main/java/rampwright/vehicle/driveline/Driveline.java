@@ -80,6 +80,12 @@ public record Driveline(
     return engine.fullLoad().torque(cageSpeed * ratio) * ratio * efficiency;
   }
 
+  /** Returns the derivative of the full-throttle cage torque with cage speed (N·m·s/rad). */
+  public double fullTorqueSlope(int gear, double cageSpeed) {
+    double ratio = ratio(gear);
+    return engine.fullLoad().slope(cageSpeed * ratio) * ratio * ratio * efficiency;
+  }
+
   /** Returns the cage torque (N·m, not positive) with closed throttle in a gear. */
   public double overrunTorque(int gear, double cageSpeed) {
     double ratio = ratio(gear);

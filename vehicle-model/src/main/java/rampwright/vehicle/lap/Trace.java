@@ -35,6 +35,11 @@ public final class Trace {
     return column;
   }
 
+  /** Sets a channel of a block by the block's first channel and the place within it. */
+  void set(Channel first, int offset, int station, double value) {
+    values[station * CHANNELS + first.ordinal() + offset] = value;
+  }
+
   void set(Channel channel, int station, double value) {
     values[station * CHANNELS + channel.ordinal()] = value;
   }

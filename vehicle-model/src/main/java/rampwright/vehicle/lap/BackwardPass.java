@@ -1,0 +1,107 @@
+package rampwright.vehicle.lap;
+
+import rampwright.vehicle.Driver;
+import rampwright.vehicle.circuit.Road;
+import rampwright.vehicle.trim.TrimLimit;
+import rampwright.vehicle.trim.TrimSolver;
+import rampwright.vehicle.trim.TrimState;
+
+/**
+ * Integrates the brake limit backward from every station that is slower than the forward pass
+ * arrives, and lowers the speeds before it.
+ */
+final class BackwardPass {
+  private final Road road;
+  private final TrimSolver solver;
+  private final Gearbox gearbox;
+  private final Profile profile;
+  private final Driver driver;
+  private final LimitForm form;
+  private final TrimState level = new TrimState();
+  private final TrimState limit = new TrimState();
+  private int gear;
+  private LapLimit reason;
+
+  BackwardPass(
+      Road road,
+      TrimSolver solver,
+      Gearbox gearbox,
+      Profile profile,
+      Driver driver,
+      LimitForm form) {
+    this.road = road;
+    this.solver = solver;
+    this.gearbox = gearbox;
+    this.profile = profile;
+    this.driver = driver;
+    this.form = form;
+  }
+
+  /** Runs once around against the direction of travel, ending at a station. */
+  void run(int start) {
+    int steps = road.closed() ? road.size() : road.size() - 1;
+    int last = road.closed() ? start : road.size() - 1;
+    double after = Double.NaN;
+    for (int k = 0; k < steps; k++) {
+      int i = Math.floorMod(last - k, road.size());
+      int previous = Math.floorMod(i - 1, road.size());
+      boolean lowered = !Double.isNaN(after);
+      double ax = Double.NaN;
+      if (lowered || profile.speed[previous] > profile.speed[i]) {
+        ax = brakeAt(i, profile.speed[i], lowered);
+      }
+      if (lowered && !Double.isNaN(ax)) {
+        profile.save(i, limit, gear, reason);
+      }
+      after =
+          profile.speed[previous] > profile.speed[i]
+              ? slowDown(i, previous, ax, after)
+              : Double.NaN;
+    }
+  }
+
+  /** Brake limit at a station; leaves it in {@code limit}. NaN when there is no trim there. */
+  private double brakeAt(int i, double speed, boolean haveLevel) {
+    solver.place(road, i);
+    gear = gearbox.best(solver.rollingCageSpeed(speed));
+    if (!haveLevel) {
+      profile.load(i, level);
+      level.braking = false;
+    }
+    if (!solver.constantSpeed(speed, level, level)) {
+      return Double.NaN;
+    }
+    TrimLimit why = solver.brakeLimit(level, gear, growthMax(i, speed), limit);
+    reason = why == TrimLimit.DRIVER ? LapLimit.SLIDE_ON_BRAKES : LapLimit.BRAKING;
+    return Math.min(0, limit.ax);
+  }
+
+  /** Lowers the station before; returns the acceleration used, or NaN when it was slow enough. */
+  private double slowDown(int i, int previous, double ax, double after) {
+    if (Double.isNaN(ax)) {
+      return Double.NaN;
+    }
+    double energy = profile.speed[i] * profile.speed[i] / 2;
+    double ds = road.spacing();
+    double slope;
+    if (Double.isNaN(after)) {
+      double guess = Math.min(Math.sqrt(2 * (energy - ax * ds)), profile.speed[previous]);
+      double before = brakeAt(previous, guess, true);
+      slope = Double.isNaN(before) ? ax : (ax + before) / 2;
+    } else {
+      slope = 1.5 * ax - 0.5 * after;
+    }
+    double reached = Math.sqrt(2 * (energy - Math.min(0, slope) * ds));
+    if (reached >= profile.speed[previous]) {
+      return Double.NaN;
+    }
+    profile.speed[previous] = reached;
+    return ax;
+  }
+
+  private double growthMax(int i, double speed) {
+    return form == LimitForm.CAR
+        ? Double.POSITIVE_INFINITY
+        : driver.brakingGrowth(speed * speed * road.curvature(i));
+  }
+}

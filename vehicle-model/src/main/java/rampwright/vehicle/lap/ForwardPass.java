@@ -1,0 +1,153 @@
+package rampwright.vehicle.lap;
+
+import rampwright.vehicle.circuit.Road;
+import rampwright.vehicle.trim.TrimLimit;
+import rampwright.vehicle.trim.TrimSolver;
+import rampwright.vehicle.trim.TrimState;
+
+/**
+ * Integrates the drive limit forward: {@code d(v²/2)/ds = ax}, held at the cornering limit where
+ * that is lower. During a gear change the car rolls without drive torque.
+ */
+final class ForwardPass {
+  /** The kinetic energy per mass does not fall below that of 1 m/s. */
+  private static final double LEAST_ENERGY = 0.5;
+
+  private final Road road;
+  private final TrimSolver solver;
+  private final Gearbox gearbox;
+  private final SpeedLimits limits;
+  private final double growthMax;
+  private final Profile profile;
+  private final TrimState level = new TrimState();
+  private final TrimState limit = new TrimState();
+
+  private int gear;
+  private double shiftLeft;
+  private double before;
+
+  ForwardPass(
+      Road road,
+      TrimSolver solver,
+      Gearbox gearbox,
+      SpeedLimits limits,
+      double growthMax,
+      Profile profile) {
+    this.road = road;
+    this.solver = solver;
+    this.gearbox = gearbox;
+    this.limits = limits;
+    this.growthMax = growthMax;
+    this.profile = profile;
+  }
+
+  /**
+   * Runs once around from a station, or to the end of an open road.
+   *
+   * @return the speed with which the car arrives at the start of a closed road again
+   */
+  double run(int start, double startSpeed) {
+    gear = gearbox.best(solver.rollingCageSpeed(startSpeed));
+    shiftLeft = 0;
+    before = Double.NaN;
+    limits.load(start, level);
+    double energy = startSpeed * startSpeed / 2;
+    for (int k = 0; k < road.size(); k++) {
+      int i = Math.floorMod(start + k, road.size());
+      double speed = Math.sqrt(2 * energy);
+      boolean capped = k > 0 && speed >= limits.speed(i) || k == 0 && limits.binds(i);
+      if (speed >= limits.speed(i)) {
+        speed = limits.speed(i);
+        before = Double.NaN;
+      }
+      energy = step(i, speed, capped);
+    }
+    return Math.min(Math.sqrt(2 * energy), limits.speed(start));
+  }
+
+  /** Saves the drive limit at a station and returns the energy at the next. */
+  private double step(int i, double speed, boolean capped) {
+    double energy = speed * speed / 2;
+    solver.place(road, i);
+    gear = gearbox.keepOrLower(gear, solver.rollingCageSpeed(speed));
+    if (!solver.constantSpeed(speed, level, level)) {
+      limits.load(i, level);
+      profile.save(i, level, gear, LapLimit.CORNERING);
+      before = Double.NaN;
+      return energy;
+    }
+    if (shiftLeft > 0 && solver.atCageTorque(level, 0, limit)) {
+      profile.save(i, limit, gear, LapLimit.SHIFT);
+      before = Double.NaN;
+      return roll(energy, limit.ax, road.spacing());
+    }
+    TrimLimit why = solver.driveLimit(level, gear, growthMax, limit);
+    profile.save(i, limit, gear, capped ? LapLimit.CORNERING : reason(why));
+    double ax = limit.ax;
+    double cageSpeed = limit.cageSpeed;
+    double slope = Double.isNaN(before) ? startSlope(i, energy, ax) : 1.5 * ax - 0.5 * before;
+    before = ax;
+    return shiftWithin(i, energy, slope, cageSpeed);
+  }
+
+  private static LapLimit reason(TrimLimit why) {
+    return switch (why) {
+      case TORQUE -> LapLimit.POWER;
+      case TYRES -> LapLimit.TRACTION;
+      case DRIVER -> LapLimit.SLIDE_ON_POWER;
+    };
+  }
+
+  /** Mean acceleration over the next interval by the trapezoidal rule, for lack of a past. */
+  private double startSlope(int i, double energy, double ax) {
+    int next = i + 1 < road.size() ? i + 1 : 0;
+    if (next == 0 && !road.closed()) {
+      return ax;
+    }
+    double speed =
+        Math.min(
+            Math.sqrt(2 * Math.max(energy + ax * road.spacing(), LEAST_ENERGY)),
+            limits.speed(next));
+    solver.place(road, next);
+    TrimState ahead = limit;
+    if (!solver.constantSpeed(speed, level, ahead)) {
+      return ax;
+    }
+    solver.driveLimit(ahead, gear, growthMax, limit);
+    return (ax + limit.ax) / 2;
+  }
+
+  /** Takes the next gear when its shift speed lies within the interval. */
+  private double shiftWithin(int i, double energy, double slope, double cageSpeed) {
+    double ds = road.spacing();
+    double next = Math.max(energy + slope * ds, LEAST_ENERGY);
+    double then = cageSpeed * Math.sqrt(next / energy);
+    double shiftSpeed = gearbox.upshiftSpeed(gear);
+    if (then < shiftSpeed) {
+      return next;
+    }
+    gear++;
+    if (gearbox.shiftTime() == 0) {
+      return next;
+    }
+    shiftLeft = gearbox.shiftTime();
+    before = Double.NaN;
+    double driven = cageSpeed >= shiftSpeed ? 0 : (shiftSpeed - cageSpeed) / (then - cageSpeed);
+    solver.place(road, i);
+    double rolling = solver.atCageTorque(level, 0, limit) ? limit.ax : 0;
+    return roll(energy + slope * ds * driven, rolling, ds * (1 - driven));
+  }
+
+  /** Rolls for the rest of the shift, then drives for what is left of the distance. */
+  private double roll(double energy, double ax, double distance) {
+    double speed = Math.sqrt(2 * energy);
+    double rolled = Math.min(distance, speed * shiftLeft);
+    shiftLeft = rolled < distance ? 0 : shiftLeft - rolled / speed;
+    double next = energy + ax * rolled;
+    if (rolled < distance) {
+      solver.driveLimit(level, gear, growthMax, limit);
+      next += limit.ax * (distance - rolled);
+    }
+    return Math.max(next, LEAST_ENERGY);
+  }
+}

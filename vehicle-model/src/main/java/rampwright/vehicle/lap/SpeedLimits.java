@@ -1,0 +1,121 @@
+package rampwright.vehicle.lap;
+
+import rampwright.vehicle.circuit.Road;
+import rampwright.vehicle.driveline.Driveline;
+import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.trim.TrimSolver;
+import rampwright.vehicle.trim.TrimState;
+
+/**
+ * Largest steady speed at every station, capped at a speed that the engine cannot exceed. Each
+ * station starts from the limit of the one before it.
+ */
+final class SpeedLimits {
+  /** First speed of a search from straight running, as lateral acceleration (m/s²). */
+  private static final double GENTLE = 1.5;
+
+  /** Share of the expected limit from which a station's search starts. */
+  private static final double BELOW = 0.93;
+
+  /** Margin over the straight-line top speed for wind, grade and wheel slip. */
+  private static final double TOP_SPEED_MARGIN = 1.2;
+
+  private final Road road;
+  private final TrimSolver solver;
+  private final double growthMax;
+  private final double topSpeed;
+  private final Profile found;
+
+  SpeedLimits(LapRequest request, Road road, TrimSolver solver, double growthMax) {
+    this.road = road;
+    this.solver = solver;
+    this.growthMax = growthMax;
+    this.topSpeed = TOP_SPEED_MARGIN * straightTopSpeed(request, solver);
+    this.found = new Profile(road.size());
+  }
+
+  /** Speed at which full throttle in the best gear only balances the drag, or the rev limit. */
+  private static double straightTopSpeed(LapRequest request, TrimSolver solver) {
+    Driveline driveline = request.car().driveline();
+    double perSpeed = solver.rollingCageSpeed(1);
+    double high = driveline.engine().revLimit() / (driveline.ratio(driveline.gears()) * perSpeed);
+    double drag = 0.5 * request.conditions().airDensity() * request.car().aero().dragArea();
+    double low = 1;
+    for (int k = 0; k < 60; k++) {
+      double speed = (low + high) / 2;
+      double cageSpeed = speed * perSpeed;
+      double torque = driveline.fullTorque(driveline.bestGear(cageSpeed), cageSpeed);
+      if (torque * perSpeed > drag * speed * speed) {
+        low = speed;
+      } else {
+        high = speed;
+      }
+    }
+    return low;
+  }
+
+  void compute() {
+    TrimState near = new TrimState();
+    TrimState out = new TrimState();
+    boolean haveNear = false;
+    for (int i = 0; i < road.size(); i++) {
+      solver.place(road, i);
+      double curvature = Math.abs(road.curvature(i));
+      boolean solved =
+          haveNear && solver.cornerLimit(near, firstSpeed(i, curvature), topSpeed, growthMax, out);
+      if (!solved) {
+        double from = Math.min(topSpeed, Math.sqrt(GENTLE / Math.max(1e-9, curvature)));
+        solved = solver.cornerLimit(null, from, topSpeed, growthMax, out);
+      }
+      if (!solved) {
+        throw InvalidInput.value(
+            "curvature at " + Math.round(i * road.spacing()) + " m",
+            road.curvature(i),
+            "1/m",
+            "one that the car can follow",
+            "check the circuit there, or the grip");
+      }
+      near.copyFrom(out);
+      haveNear = true;
+      found.save(i, out, 1, LapLimit.CORNERING);
+      if (out.speed >= topSpeed) {
+        found.speed[i] = topSpeed;
+      }
+    }
+  }
+
+  /** Speed from which the search starts, judged from the station before. */
+  private double firstSpeed(int i, double curvature) {
+    double before = Math.abs(road.curvature(i - 1));
+    if (found.speed[i - 1] >= topSpeed || curvature == 0) {
+      return topSpeed;
+    }
+    double expected = found.speed[i - 1] * Math.min(2, Math.sqrt(before / curvature));
+    return BELOW * Math.min(topSpeed, expected);
+  }
+
+  /** Returns the limit (m/s) at a station. */
+  double speed(int i) {
+    return found.speed[i];
+  }
+
+  /** Returns whether the limit lies below every speed that the engine can reach. */
+  boolean binds(int i) {
+    return found.speed[i] < topSpeed;
+  }
+
+  void load(int i, TrimState out) {
+    found.load(i, out);
+  }
+
+  /** Returns the station with the lowest limit. */
+  int slowest() {
+    int slowest = 0;
+    for (int i = 1; i < road.size(); i++) {
+      if (found.speed[i] < found.speed[slowest]) {
+        slowest = i;
+      }
+    }
+    return slowest;
+  }
+}

@@ -1,0 +1,116 @@
+package rampwright.vehicle.lap;
+
+import rampwright.vehicle.circuit.Road;
+import rampwright.vehicle.driveline.Driveline;
+import rampwright.vehicle.trim.TrimResults;
+import rampwright.vehicle.trim.TrimSolver;
+import rampwright.vehicle.trim.TrimState;
+
+/**
+ * Turns the final profile into a trace. Every station's trim is solved once more; where the profile
+ * was lowered to a limit of speed, the trim is the one whose acceleration is that of the profile.
+ */
+final class TraceWriter {
+  private final Road road;
+  private final TrimSolver solver;
+  private final Gearbox gearbox;
+  private final Driveline driveline;
+  private final Profile profile;
+  private final Trace trace;
+  private final TrimState state = new TrimState();
+  private final TrimState level = new TrimState();
+
+  TraceWriter(Road road, TrimSolver solver, Gearbox gearbox, Driveline driveline, Profile profile) {
+    this.road = road;
+    this.solver = solver;
+    this.gearbox = gearbox;
+    this.driveline = driveline;
+    this.profile = profile;
+    this.trace = new Trace(road.size());
+  }
+
+  Trace write() {
+    double time = 0;
+    for (int i = 0; i < road.size(); i++) {
+      if (i > 0) {
+        time += LapSolver.interval(road.spacing(), profile.speed[i - 1], profile.speed[i]);
+      }
+      solver.place(road, i);
+      profile.load(i, state);
+      int gear = profile.gear[i];
+      if (profile.limit[i] == LapLimit.CORNERING || !solver.restore(state)) {
+        gear = gearbox.best(solver.rollingCageSpeed(profile.speed[i]));
+        follow(i, gear);
+      }
+      row(i, time, gear);
+    }
+    return trace;
+  }
+
+  /** Solves for the acceleration that the neighbouring speeds ask for. */
+  private void follow(int i, int gear) {
+    int n = road.size();
+    int before = road.closed() ? Math.floorMod(i - 1, n) : Math.max(0, i - 1);
+    int after = road.closed() ? Math.floorMod(i + 1, n) : Math.min(n - 1, i + 1);
+    int intervals = road.closed() || i > 0 && i < n - 1 ? 2 : 1;
+    double energyChange =
+        (profile.speed[after] * profile.speed[after]
+                - profile.speed[before] * profile.speed[before])
+            / 2;
+    double ax = energyChange / (intervals * road.spacing());
+    state.braking = false;
+    if (!solver.constantSpeed(profile.speed[i], state, level)) {
+      throw new IllegalStateException("no trim at constant speed at station " + i);
+    }
+    if (!solver.atAcceleration(level, ax, gear, state) || !solver.restore(state)) {
+      state.copyFrom(level);
+      if (!solver.restore(state)) {
+        throw new IllegalStateException("no trim at station " + i);
+      }
+    }
+  }
+
+  private void row(int i, double time, int gear) {
+    TrimResults r = solver.results();
+    double speed = profile.speed[i];
+    set(Channel.DISTANCE, i, i * road.spacing());
+    set(Channel.TIME, i, time);
+    set(Channel.SPEED, i, speed);
+    set(Channel.CURVATURE, i, road.curvature(i));
+    set(Channel.CURVATURE_GRADIENT, i, road.curvatureGradient(i));
+    set(Channel.AX, i, state.ax);
+    set(Channel.AY, i, speed * speed * road.curvature(i));
+    set(Channel.SIDESLIP, i, state.sideslip);
+    set(Channel.STEER, i, state.steer);
+    set(Channel.CAGE_TORQUE, i, state.cageTorque);
+    set(Channel.FULL_TORQUE, i, driveline.fullTorque(gear, state.cageSpeed));
+    set(Channel.BRAKE_TORQUE, i, state.brakeTorque);
+    set(Channel.GEAR, i, gear);
+    set(Channel.LIMIT, i, profile.limit[i].ordinal());
+    set(Channel.SIGMA, i, r.sigma());
+    set(Channel.CONTROL, i, r.control());
+    set(Channel.YAW_MOMENT, i, r.yawMoment());
+    for (int p = 0; p < 3; p++) {
+      block(Channel.FRONT_CAGE_TORQUE, 4 * p, i, r.cageTorque(p));
+      block(Channel.FRONT_TORQUE_DIFFERENCE, 4 * p, i, r.torqueDifference(p));
+      block(Channel.FRONT_SPEED_DIFFERENCE, 4 * p, i, r.speedDifference(p));
+      block(Channel.FRONT_CAPACITY, 4 * p, i, r.capacity(p));
+    }
+    for (int w = 0; w < 4; w++) {
+      block(Channel.FX_FL, w, i, r.fx(w));
+      block(Channel.FY_FL, w, i, r.fy(w));
+      block(Channel.FZ_FL, w, i, r.fz(w));
+      block(Channel.SLIP_FL, w, i, state.slip[w]);
+      block(Channel.SLIP_ANGLE_FL, w, i, r.slipAngle(w));
+      block(Channel.WHEEL_SPEED_FL, w, i, r.wheelSpeed(w));
+    }
+  }
+
+  private void set(Channel channel, int i, double value) {
+    trace.set(channel, i, value);
+  }
+
+  private void block(Channel first, int offset, int i, double value) {
+    trace.set(first, offset, i, value);
+  }
+}

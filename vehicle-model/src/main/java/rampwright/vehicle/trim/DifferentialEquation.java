@@ -1,0 +1,133 @@
+package rampwright.vehicle.trim;
+
+import rampwright.vehicle.differential.Differential;
+
+/**
+ * The law of one differential as an equation of the trim. Torque difference, speed difference and
+ * cage torque are linear in the results of {@link ForceBalance} and, with the brakes on, in the
+ * input torque.
+ *
+ * <p>Sticking or sliding is decided exactly: with the friction torque difference {@code Df}, the
+ * capacity {@code C}, the speed difference {@code dw} and a speed scale {@code w},
+ *
+ * <pre>
+ *   z = Df/C + dw/w      |z| &lt;= 1: dw = 0      otherwise: Df = C sign(z)
+ * </pre>
+ *
+ * which is the semi-smooth form of the law: any solution has {@code |Df| <= C} and slides in the
+ * direction of its friction. The row's sign is chosen so that it rises with the speed of the left
+ * output whether sticking or sliding.
+ */
+final class DifferentialEquation {
+  /** How the outputs stand to each other. */
+  enum State {
+    STICKING,
+    LEFT_FASTER,
+    RIGHT_FASTER,
+    /** No friction: only the torque difference of viscous shear, or none. */
+    FRICTIONLESS
+  }
+
+  private final Differential law;
+  private final double[] differenceOf;
+  private final double[] speedOf;
+  private final double[] cageOf;
+  private final double differenceByInput;
+  private final double cageByInput;
+
+  /** Torque of the right output minus the left (N·m). */
+  double torqueDifference;
+
+  /** Speed of the left output minus the right (rad/s). */
+  double speedDifference;
+
+  /** Torque into the case (N·m). */
+  double cageTorque;
+
+  /** Largest friction torque difference (N·m). */
+  double capacity;
+
+  /** Sticking or sliding at the last evaluation. */
+  State state;
+
+  /** Scaled residual of the law at the last evaluation. */
+  double residual;
+
+  DifferentialEquation(
+      Differential law,
+      double[] differenceOf,
+      double differenceByInput,
+      double[] speedOf,
+      double[] cageOf,
+      double cageByInput) {
+    this.law = law;
+    this.differenceOf = differenceOf;
+    this.differenceByInput = differenceByInput;
+    this.speedOf = speedOf;
+    this.cageOf = cageOf;
+    this.cageByInput = cageByInput;
+  }
+
+  /**
+   * Evaluates the law.
+   *
+   * @param value results of the force balance
+   * @param input given cage torque of the whole car (N·m), used with the brakes on
+   * @param speedScale {@code w} (rad/s)
+   * @param torqueScale torque that counts as one in the residual (N·m)
+   */
+  void evaluate(double[] value, double input, double speedScale, double torqueScale) {
+    torqueDifference = dot(differenceOf, value) + differenceByInput * input;
+    speedDifference = dot(speedOf, value);
+    cageTorque = dot(cageOf, value) + cageByInput * input;
+    capacity = law.capacity(cageTorque);
+    double friction = torqueDifference - law.viscousTorque(speedDifference);
+    if (capacity == Double.POSITIVE_INFINITY) {
+      state = State.STICKING;
+    } else if (capacity <= 1e-12 * torqueScale) {
+      state = State.FRICTIONLESS;
+    } else {
+      double z = friction / capacity + speedDifference / speedScale;
+      state = z > 1 ? State.LEFT_FASTER : z < -1 ? State.RIGHT_FASTER : State.STICKING;
+    }
+    residual =
+        switch (state) {
+          case STICKING -> speedDifference / speedScale;
+          case LEFT_FASTER -> (capacity - friction) / torqueScale;
+          case RIGHT_FASTER -> (-capacity - friction) / torqueScale;
+          case FRICTIONLESS -> -friction / torqueScale;
+        };
+  }
+
+  /** Returns the change of the residual for a change of the force balance, state held. */
+  double change(double[] change, double speedScale, double torqueScale) {
+    double dSpeed = dot(speedOf, change);
+    if (state == State.STICKING) {
+      return dSpeed / speedScale;
+    }
+    double dFriction = dot(differenceOf, change) - law.viscousSlope(speedDifference) * dSpeed;
+    if (state == State.FRICTIONLESS) {
+      return -dFriction / torqueScale;
+    }
+    double dCapacity = law.capacitySlope(cageTorque) * dot(cageOf, change);
+    return (state == State.LEFT_FASTER ? dCapacity - dFriction : -dCapacity - dFriction)
+        / torqueScale;
+  }
+
+  DifferentialState snapshot() {
+    return new DifferentialState(
+        cageTorque,
+        Math.abs(torqueDifference),
+        Math.abs(speedDifference),
+        capacity,
+        state == State.STICKING);
+  }
+
+  static double dot(double[] coefficients, double[] values) {
+    double sum = 0;
+    for (int j = ForceBalance.TORQUE; j < ForceBalance.SIZE; j++) {
+      sum += coefficients[j] * values[j];
+    }
+    return sum;
+  }
+}

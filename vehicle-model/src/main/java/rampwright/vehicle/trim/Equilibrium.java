@@ -1,0 +1,398 @@
+package rampwright.vehicle.trim;
+
+import rampwright.vehicle.driveline.Driveline;
+
+/**
+ * The equations of a trim and their solution by Newton's method. Unknowns: sideslip, steer, path
+ * acceleration (or speed, when the acceleration is given) and the slips of the active wheels.
+ * Equations: longitudinal and lateral force, yaw moment
+ *
+ * <pre>
+ *   sum Mz = Izz r_dot,   r = v kappa,   r_dot = v² kappa' + kappa ax
+ * </pre>
+ *
+ * the law of each differential, brake balance, and one closing condition. The Jacobian is exact. A
+ * workspace, one instance per thread and per driveline equations.
+ */
+final class Equilibrium {
+  /** What closes the equations. */
+  enum Closing {
+    /** Mean slip of the active wheels has a given value. */
+    MEAN_SLIP,
+    /** Torque of all active wheels together has a given value. */
+    TOTAL_TORQUE,
+    /** Path acceleration has a given value. */
+    ACCELERATION,
+    /** Cage torque is the engine's full-load torque in a given gear. */
+    FULL_LOAD,
+    /** Distance along the tangent, with speed as the third unknown at zero path acceleration. */
+    ARC
+  }
+
+  private static final int MOST_ITERATIONS = 30;
+
+  /** Largest scaled residual of an accepted trim. */
+  private static final double TOLERANCE = 1e-10;
+
+  private static final double LARGEST_ANGLE_STEP = 0.12;
+  private static final double LARGEST_SLIP_STEP = 0.08;
+
+  final ForceBalance forces;
+  final DrivelineEquations driveline;
+  private final Driveline engineSide;
+  private final SmallSystem system = new SmallSystem(7, 2);
+  private final int size;
+  private final double[] rightSide = new double[7];
+
+  // workspace of one evaluation
+  private double fx;
+  private double fy;
+  private double speedScale;
+  private double torqueScale;
+
+  // closing condition
+  private Closing closing;
+  private double target;
+  private int gear;
+
+  /** Cage torque with the brakes on (N·m). */
+  double input;
+
+  /** Direction of the branch for {@link Closing#ARC}: sideslip, steer, speed, slips; scaled. */
+  final double[] arcDirection = new double[7];
+
+  final double[] arcOrigin = new double[7];
+
+  /** Unknowns change by these amounts for one unit of arc length. */
+  final double[] arcScale = new double[7];
+
+  Equilibrium(ForceBalance forces, DrivelineEquations driveline, Driveline engineSide) {
+    this.forces = forces;
+    this.driveline = driveline;
+    this.engineSide = engineSide;
+    this.size = 3 + driveline.activeWheels.length;
+  }
+
+  int size() {
+    return size;
+  }
+
+  boolean atMeanSlip(TrimState state, double meanSlip) {
+    return solve(state, Closing.MEAN_SLIP, meanSlip, 0);
+  }
+
+  boolean atTotalTorque(TrimState state, double torque) {
+    return solve(state, Closing.TOTAL_TORQUE, torque, 0);
+  }
+
+  boolean atAcceleration(TrimState state, double ax) {
+    return solve(state, Closing.ACCELERATION, ax, 0);
+  }
+
+  boolean atFullLoad(TrimState state, int inGear) {
+    return solve(state, Closing.FULL_LOAD, 0, inGear);
+  }
+
+  boolean alongArc(TrimState state, double distance) {
+    return solve(state, Closing.ARC, distance, 0);
+  }
+
+  /**
+   * Solves from the state given, which is overwritten.
+   *
+   * @return false when Newton's method does not converge; the state is then of no use
+   */
+  private boolean solve(TrimState state, Closing how, double value, int inGear) {
+    closing = how;
+    target = value;
+    gear = inGear;
+    for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
+      evaluate(state);
+      double worst = assemble(state);
+      if (!(worst < 1e6)) {
+        return false;
+      }
+      if (worst < TOLERANCE) {
+        finish(state);
+        return true;
+      }
+      if (!system.solve(size, 1)) {
+        return false;
+      }
+      step(state);
+    }
+    return false;
+  }
+
+  private void evaluate(TrimState state) {
+    double v = state.speed;
+    double cosBeta = Math.cos(state.sideslip);
+    double sinBeta = Math.sin(state.sideslip);
+    double tangential = forces.tangential(v, state.ax);
+    double normal = forces.normal(v);
+    fx = tangential * cosBeta - normal * sinBeta;
+    fy = tangential * sinBeta + normal * cosBeta;
+    forces.evaluate(v, state.sideslip, forces.curvature, state.steer, fx, fy, state.slip);
+    double radius = forces.radius(driveline.activeWheels[driveline.activeWheels.length - 1]);
+    speedScale = 0.05 * v / radius;
+    torqueScale = forces.weight * radius;
+    for (DifferentialEquation differential : driveline.differentials) {
+      differential.evaluate(forces.value, input, speedScale, torqueScale);
+    }
+  }
+
+  /** Fills matrix and right-hand side; returns the largest scaled residual. */
+  private double assemble(TrimState state) {
+    double v = state.speed;
+    double yawAcceleration = v * v * forces.curvatureGradient + forces.curvature * state.ax;
+    double perForce = 1 / forces.weight;
+    double perMoment = perForce / forces.wheelbase;
+    rightSide[0] = -(forces.value[ForceBalance.X] - forces.mass * fx) * perForce;
+    rightSide[1] = -(forces.value[ForceBalance.Y] - forces.mass * fy) * perForce;
+    rightSide[2] =
+        -(forces.value[ForceBalance.M] - forces.yawInertia * yawAcceleration) * perMoment;
+    int row = 3;
+    for (DifferentialEquation differential : driveline.differentials) {
+      rightSide[row++] = -differential.residual;
+    }
+    if (driveline.undrivenCageOf != null) {
+      rightSide[row++] =
+          -(DifferentialEquation.dot(driveline.undrivenCageOf, forces.value)
+                  + driveline.undrivenCageByInput * input)
+              / torqueScale;
+    }
+    if (row < size) {
+      rightSide[row] = -closingResidual(state);
+    }
+
+    double cosBeta = Math.cos(state.sideslip);
+    double sinBeta = Math.sin(state.sideslip);
+    column(state, 0, 1, 0, -fy, fx, 0, 0);
+    column(state, 1, 0, 1, 0, 0, 0, 0);
+    if (closing == Closing.ARC) {
+      double dTangential = forces.tangentialBySpeed(v);
+      double dNormal = forces.normalBySpeed(v);
+      column(
+          state,
+          2,
+          0,
+          0,
+          dTangential * cosBeta - dNormal * sinBeta,
+          dTangential * sinBeta + dNormal * cosBeta,
+          1,
+          2 * v * forces.curvatureGradient);
+    } else {
+      column(state, 2, 0, 0, cosBeta, sinBeta, 0, forces.curvature);
+    }
+    for (int j = 0; j < driveline.activeWheels.length; j++) {
+      forces.slipDirection(driveline.activeWheels[j]);
+      storeColumn(state, 3 + j, 0, 0, 0);
+    }
+    double worst = 0;
+    for (int i = 0; i < size; i++) {
+      system.a[system.rightHandSide(i, 0)] = rightSide[i];
+      worst = Math.max(worst, Math.abs(rightSide[i]));
+      if (Double.isNaN(rightSide[i])) {
+        return Double.NaN;
+      }
+    }
+    return worst;
+  }
+
+  private void column(
+      TrimState state,
+      int j,
+      double dBeta,
+      double dDelta,
+      double dFx,
+      double dFy,
+      double dSpeed,
+      double dYawAcceleration) {
+    forces.direction(dBeta, 0, dDelta, dFx, dFy, dSpeed);
+    storeColumn(state, j, dFx, dFy, dYawAcceleration);
+  }
+
+  private void storeColumn(
+      TrimState state, int j, double dFx, double dFy, double dYawAcceleration) {
+    double[] a = system.a;
+    double[] change = forces.change;
+    double perForce = 1 / forces.weight;
+    a[system.at(0, j)] = (change[ForceBalance.X] - forces.mass * dFx) * perForce;
+    a[system.at(1, j)] = (change[ForceBalance.Y] - forces.mass * dFy) * perForce;
+    a[system.at(2, j)] =
+        (change[ForceBalance.M] - forces.yawInertia * dYawAcceleration)
+            * perForce
+            / forces.wheelbase;
+    int row = 3;
+    for (DifferentialEquation differential : driveline.differentials) {
+      a[system.at(row++, j)] = differential.change(change, speedScale, torqueScale);
+    }
+    if (driveline.undrivenCageOf != null) {
+      a[system.at(row++, j)] =
+          DifferentialEquation.dot(driveline.undrivenCageOf, change) / torqueScale;
+    }
+    a[system.at(row, j)] = closingChange(state, j);
+  }
+
+  private double closingResidual(TrimState state) {
+    return switch (closing) {
+      case MEAN_SLIP -> meanSlip(state) - target;
+      case TOTAL_TORQUE ->
+          (DifferentialEquation.dot(driveline.totalTorqueOf, forces.value) - target) / torqueScale;
+      case ACCELERATION -> (state.ax - target) / 10;
+      case FULL_LOAD -> {
+        double cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
+        double torque = DifferentialEquation.dot(driveline.totalTorqueOf, forces.value);
+        yield (torque - engineSide.fullTorque(gear, cageSpeed)) / torqueScale;
+      }
+      case ARC -> {
+        double sum = -target;
+        for (int j = 0; j < size; j++) {
+          sum += arcDirection[j] * (arcUnknown(state, j) - arcOrigin[j]) / arcScale[j];
+        }
+        yield sum;
+      }
+    };
+  }
+
+  private double closingChange(TrimState state, int j) {
+    return switch (closing) {
+      case MEAN_SLIP -> j < 3 ? 0 : 1.0 / driveline.activeWheels.length;
+      case TOTAL_TORQUE ->
+          DifferentialEquation.dot(driveline.totalTorqueOf, forces.change) / torqueScale;
+      case ACCELERATION -> j == 2 ? 0.1 : 0;
+      case FULL_LOAD -> {
+        double cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
+        double slope = engineSide.fullTorqueSlope(gear, cageSpeed);
+        yield (DifferentialEquation.dot(driveline.totalTorqueOf, forces.change)
+                - slope * DifferentialEquation.dot(driveline.cageSpeedOf, forces.change))
+            / torqueScale;
+      }
+      case ARC -> arcDirection[j] / arcScale[j];
+    };
+  }
+
+  /** Returns an unknown of the branch of constant-speed trims. */
+  double arcUnknown(TrimState state, int j) {
+    return switch (j) {
+      case 0 -> state.sideslip;
+      case 1 -> state.steer;
+      case 2 -> state.speed;
+      default -> state.slip[driveline.activeWheels[j - 3]];
+    };
+  }
+
+  void arcAdd(TrimState state, int j, double change) {
+    switch (j) {
+      case 0 -> state.sideslip += change;
+      case 1 -> state.steer += change;
+      case 2 -> state.speed += change;
+      default -> state.slip[driveline.activeWheels[j - 3]] += change;
+    }
+  }
+
+  /** Turns an arc's solution into the tangent there, of unit length. */
+  private void turnArc() {
+    double norm = 0;
+    for (int j = 0; j < size; j++) {
+      double component = solution(j) / arcScale[j];
+      norm += component * component;
+    }
+    norm = Math.sqrt(norm);
+    for (int j = 0; j < size; j++) {
+      arcDirection[j] = solution(j) / arcScale[j] / norm;
+    }
+  }
+
+  /** Evaluates a solved state once more to learn the determinant's sign at constant mean slip. */
+  boolean signAtMeanSlip(TrimState state) {
+    return atMeanSlip(state, meanSlip(state));
+  }
+
+  private double meanSlip(TrimState state) {
+    double sum = 0;
+    for (int i : driveline.activeWheels) {
+      sum += state.slip[i];
+    }
+    return sum / driveline.activeWheels.length;
+  }
+
+  private double solution(int j) {
+    return system.a[system.rightHandSide(j, 0)];
+  }
+
+  private void step(TrimState state) {
+    double shrink = Math.max(Math.abs(solution(0)), Math.abs(solution(1))) / LARGEST_ANGLE_STEP;
+    for (int j = 3; j < size; j++) {
+      shrink = Math.max(shrink, Math.abs(solution(j)) / LARGEST_SLIP_STEP);
+    }
+    if (closing == Closing.ARC) {
+      shrink = Math.max(shrink, Math.abs(solution(2)) / (0.2 * state.speed));
+    }
+    double factor = shrink > 1 ? 1 / shrink : 1;
+    state.sideslip += factor * solution(0);
+    state.steer += factor * solution(1);
+    if (closing == Closing.ARC) {
+      state.speed += factor * solution(2);
+    } else {
+      state.ax += factor * solution(2);
+    }
+    for (int j = 3; j < size; j++) {
+      state.slip[driveline.activeWheels[j - 3]] += factor * solution(j);
+    }
+  }
+
+  /** Stores results and, from the factorised matrix at the solution, the tangent of the branch. */
+  private void finish(TrimState state) {
+    state.braking = driveline.braking;
+    state.meanSlip = meanSlip(state);
+    double total = DifferentialEquation.dot(driveline.totalTorqueOf, forces.value);
+    state.cageTorque = driveline.braking ? input : total;
+    state.brakeTorque = driveline.brakeTorque(forces.value, input);
+    state.cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
+    state.sigma = Double.NaN;
+    tangent(state);
+  }
+
+  private void tangent(TrimState state) {
+    int last = size - 1;
+    for (int i = 0; i < size; i++) {
+      system.a[system.rightHandSide(i, 0)] = i == last ? 1 : 0;
+    }
+    if (closing != Closing.MEAN_SLIP && closing != Closing.ARC) {
+      for (int j = 0; j < size; j++) {
+        system.a[system.at(last, j)] = j < 3 ? 0 : 1.0 / driveline.activeWheels.length;
+      }
+    }
+    boolean solved = system.solve(size, 1);
+    if (closing == Closing.ARC) {
+      turnArc();
+      return;
+    }
+    state.determinantSign = solved ? system.determinantSign : 0;
+    if (!solved) {
+      return;
+    }
+    state.sideslipRate = solution(0);
+    state.steerRate = solution(1);
+    state.axRate = solution(2);
+    java.util.Arrays.fill(state.slipRate, 0);
+    for (int j = 3; j < size; j++) {
+      state.slipRate[driveline.activeWheels[j - 3]] = solution(j);
+    }
+    double cosBeta = Math.cos(state.sideslip);
+    double sinBeta = Math.sin(state.sideslip);
+    forces.direction(
+        state.sideslipRate,
+        0,
+        state.steerRate,
+        -fy * state.sideslipRate + cosBeta * state.axRate,
+        fx * state.sideslipRate + sinBeta * state.axRate,
+        0);
+    double rate = DifferentialEquation.dot(driveline.totalTorqueOf, forces.change);
+    for (int i : driveline.activeWheels) {
+      rate += forces.tyre[i].fxSlip * forces.radius(i) * state.slipRate[i];
+    }
+    state.torqueRate = driveline.braking ? -rate : rate;
+  }
+}

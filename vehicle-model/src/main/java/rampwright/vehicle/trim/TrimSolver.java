@@ -1,0 +1,282 @@
+package rampwright.vehicle.trim;
+
+import java.util.Arrays;
+import rampwright.vehicle.Car;
+import rampwright.vehicle.Conditions;
+import rampwright.vehicle.circuit.Road;
+import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.driveline.DriveLayout;
+import rampwright.vehicle.driveline.Driveline;
+
+/**
+ * Trims and limits of one car with one set of differentials, at one point of the road after
+ * another. A workspace, one instance per thread; what was solved before changes results only within
+ * the solver's tolerance.
+ *
+ * <p>Growth limits are the largest growth rate of a slide that the driver masters (1/s), infinite
+ * for the car's own limit.
+ */
+public final class TrimSolver {
+  /** Steps in which torque is taken off when lifting the throttle at once has no trim. */
+  private static final int LIFT_STEPS = 20;
+
+  private final Car car;
+  private final Driveline engineSide;
+  private final ForceBalance forces;
+  private final Equilibrium drive;
+  private final Equilibrium brake;
+  private final Stability stability = new Stability();
+  private final BranchStart driveStart;
+  private final int brakeSign;
+  private final CornerLimit corner;
+  private final SlipMarch driveMarch;
+  private final SlipMarch brakeMarch;
+  private final FullLoad fullLoad = new FullLoad();
+  private final FullBrakes fullBrakes = new FullBrakes();
+  private final TrimState work = new TrimState();
+  private final TrimState trial = new TrimState();
+  private final TrimResults driveResults;
+  private final TrimResults brakeResults;
+
+  /** Prepares the equations. */
+  public TrimSolver(Car car, Conditions conditions, DifferentialSet differentials) {
+    this.car = car;
+    this.engineSide = car.driveline();
+    this.forces = new ForceBalance(car, conditions);
+    this.drive =
+        new Equilibrium(forces, DrivelineEquations.driving(car, differentials), engineSide);
+    this.brake =
+        new Equilibrium(forces, DrivelineEquations.braking(car, differentials), engineSide);
+    this.driveStart = new BranchStart(drive);
+    this.brakeSign = new BranchStart(brake).referenceSign;
+    this.corner = new CornerLimit(drive, stability, driveStart);
+    this.driveMarch = new SlipMarch(drive, stability);
+    this.brakeMarch = new SlipMarch(brake, stability);
+    this.driveResults = resultsOf(drive);
+    this.brakeResults = resultsOf(brake);
+  }
+
+  private TrimResults resultsOf(Equilibrium equilibrium) {
+    DriveLayout layout = engineSide.layout();
+    return new TrimResults(
+        forces,
+        equilibrium.driveline,
+        layout != DriveLayout.REAR,
+        layout != DriveLayout.FRONT,
+        stability,
+        trial);
+  }
+
+  /** Moves to a station of a road. */
+  public void place(Road road, int station) {
+    forces.place(
+        road.curvature(station),
+        road.curvatureGradient(station),
+        road.grade(station),
+        road.bank(station),
+        road.verticalCurvature(station),
+        road.gripLeft(station),
+        road.gripRight(station),
+        road.headwind(station));
+  }
+
+  /** Moves to a flat point of even grip without wind. */
+  public void place(double curvature, double curvatureGradient) {
+    forces.place(curvature, curvatureGradient, 0, 0, 0, 1, 1, 0);
+  }
+
+  /** Returns the speed of the engine-driven case (rad/s) when rolling free at a speed (m/s). */
+  public double rollingCageSpeed(double speed) {
+    int[] driven = drive.driveline.activeWheels;
+    return speed / forces.radius(driven[driven.length - 1]);
+  }
+
+  /**
+   * Solves for constant speed, following the path from straight running.
+   *
+   * @return whether such a trim is joined to straight running
+   */
+  public boolean constantSpeed(double speed, TrimState out) {
+    return driveStart.coasting(speed, work) && driveStart.constantSpeed(work, out);
+  }
+
+  /** Solves for constant speed from a trim nearby; falls back on the way from straight running. */
+  public boolean constantSpeed(double speed, TrimState near, TrimState out) {
+    out.copyFrom(near);
+    out.speed = speed;
+    out.ax = 0;
+    boolean solved =
+        !near.braking
+            && drive.atAcceleration(out, 0)
+            && out.determinantSign == driveStart.referenceSign;
+    return solved || constantSpeed(speed, out);
+  }
+
+  /**
+   * Finds the largest acceleration.
+   *
+   * @param level trim at constant speed
+   * @param gear gear that is in
+   * @param growthMax growth limit on power
+   * @param out receives the trim at the limit
+   */
+  public TrimLimit driveLimit(TrimState level, int gear, double growthMax, TrimState out) {
+    work.copyFrom(level);
+    drive.atAcceleration(work, 0);
+    fullLoad.gear = gear;
+    return driveMarch.find(work, fullLoad, growthMax, driveStart.referenceSign, out);
+  }
+
+  /**
+   * Finds the strongest braking: the throttle is closed, then the brakes are applied.
+   *
+   * @param level trim at constant speed
+   * @param gear gear that is in, for the engine's overrun torque
+   * @param growthMax growth limit when braking
+   * @param out receives the trim at the limit
+   */
+  public TrimLimit brakeLimit(TrimState level, int gear, double growthMax, TrimState out) {
+    double overrun = engineSide.overrunTorque(gear, rollingCageSpeed(level.speed));
+    if (!lift(level, overrun, growthMax, out)) {
+      return TrimLimit.DRIVER;
+    }
+    brake.input = overrun;
+    work.copyFrom(out);
+    if (!brake.atTotalTorque(work, overrun) || work.determinantSign != brakeSign) {
+      return TrimLimit.DRIVER;
+    }
+    return brakeMarch.find(work, fullBrakes, growthMax, brakeSign, out);
+  }
+
+  /** Closes the throttle; returns whether the driver masters the car all the way. */
+  private boolean lift(TrimState level, double overrun, double growthMax, TrimState out) {
+    work.copyFrom(level);
+    if (drive.atTotalTorque(work, overrun)
+        && work.determinantSign == driveStart.referenceSign
+        && masters(work, growthMax)) {
+      out.copyFrom(work);
+      return true;
+    }
+    out.copyFrom(level);
+    double step = (overrun - level.cageTorque) / LIFT_STEPS;
+    for (int i = 0; i < 3 * LIFT_STEPS; i++) {
+      double torque = out.cageTorque + step;
+      if (torque <= overrun) {
+        return false;
+      }
+      work.copyFrom(out);
+      boolean good =
+          drive.atTotalTorque(work, torque)
+              && work.determinantSign == driveStart.referenceSign
+              && masters(work, growthMax);
+      if (good) {
+        out.copyFrom(work);
+      } else {
+        step /= 4;
+      }
+    }
+    return false;
+  }
+
+  private boolean masters(TrimState state, double growthMax) {
+    if (growthMax == Double.POSITIVE_INFINITY) {
+      return true;
+    }
+    stability.evaluate(forces, drive.driveline, state.speed, state.sideslip);
+    state.sigma = stability.sigma;
+    return state.sigma <= growthMax;
+  }
+
+  /**
+   * Finds the largest speed at constant speed.
+   *
+   * @param near trim at constant speed nearby, or null to start from straight running
+   * @param from speed to start from (m/s), below the limit
+   * @param topSpeed speed above which the limit is of no interest (m/s)
+   * @param growthMax growth limit on power
+   * @param out receives the trim at the limit, or at the first speed at or above {@code topSpeed}
+   * @return false when there is no steady trim at the first speed
+   */
+  public boolean cornerLimit(
+      TrimState near, double from, double topSpeed, double growthMax, TrimState out) {
+    return near == null
+        ? corner.find(from, topSpeed, growthMax, out)
+        : corner.findFrom(near, from, topSpeed, growthMax, out);
+  }
+
+  /** Solves for a cage torque with the brakes off, from a trim nearby; returns whether it did. */
+  public boolean atCageTorque(TrimState near, double torque, TrimState out) {
+    out.copyFrom(near);
+    return drive.atTotalTorque(out, torque) && out.determinantSign == driveStart.referenceSign;
+  }
+
+  /**
+   * Solves for a path acceleration, with throttle or, when closing it is not enough, with the
+   * brakes.
+   *
+   * @param level trim at constant speed
+   * @return whether there is such a trim
+   */
+  public boolean atAcceleration(TrimState level, double ax, int gear, TrimState out) {
+    out.copyFrom(level);
+    double overrun = engineSide.overrunTorque(gear, rollingCageSpeed(level.speed));
+    if (drive.atAcceleration(out, ax) && out.cageTorque >= overrun) {
+      return true;
+    }
+    brake.input = overrun;
+    out.copyFrom(level);
+    Arrays.fill(out.slip, 0);
+    return brake.atTotalTorque(out, overrun) && brake.atAcceleration(out, ax);
+  }
+
+  /**
+   * Solves a known trim once more, so that every result below belongs to it.
+   *
+   * @return whether it is a trim at the point where the solver stands
+   */
+  public boolean restore(TrimState state) {
+    Equilibrium equilibrium = state.braking ? brake : drive;
+    brake.input = state.braking ? state.cageTorque : 0;
+    trial.copyFrom(state);
+    boolean solved = equilibrium.atMeanSlip(trial, state.meanSlip);
+    if (solved) {
+      stability.evaluate(forces, equilibrium.driveline, trial.speed, trial.sideslip);
+      trial.sigma = stability.sigma;
+      state.copyFrom(trial);
+    }
+    return solved;
+  }
+
+  /** Returns the results of the trim that was restored last. */
+  public TrimResults results() {
+    return trial.braking ? brakeResults : driveResults;
+  }
+
+  /** Torque left until full throttle. */
+  private final class FullLoad implements SlipMarch.TorqueCap {
+    private int gear;
+
+    @Override
+    public double headroom(TrimState state) {
+      return engineSide.fullTorque(gear, state.cageSpeed) - state.cageTorque;
+    }
+
+    @Override
+    public boolean solve(Equilibrium equilibrium, TrimState state) {
+      return equilibrium.atFullLoad(state, gear);
+    }
+  }
+
+  /** Torque left until the brakes have no more. */
+  private final class FullBrakes implements SlipMarch.TorqueCap {
+    @Override
+    public double headroom(TrimState state) {
+      return car.brakes().maxTorque() - state.brakeTorque;
+    }
+
+    @Override
+    public boolean solve(Equilibrium equilibrium, TrimState state) {
+      return equilibrium.atTotalTorque(state, equilibrium.input - car.brakes().maxTorque());
+    }
+  }
+}
