@@ -14,6 +14,7 @@ final class BackwardPass {
   private final Road road;
   private final TrimSolver solver;
   private final Gearbox gearbox;
+  private final SpeedLimits limits;
   private final Profile profile;
   private final Driver driver;
   private final LimitForm form;
@@ -26,15 +27,16 @@ final class BackwardPass {
       Road road,
       TrimSolver solver,
       Gearbox gearbox,
+      SpeedLimits limits,
       Profile profile,
-      Driver driver,
-      LimitForm form) {
+      LapRequest request) {
     this.road = road;
     this.solver = solver;
     this.gearbox = gearbox;
+    this.limits = limits;
     this.profile = profile;
-    this.driver = driver;
-    this.form = form;
+    this.driver = request.driver();
+    this.form = request.form();
   }
 
   /** Runs once around against the direction of travel, ending at a station. */
@@ -46,6 +48,9 @@ final class BackwardPass {
       int i = Math.floorMod(last - k, road.size());
       int previous = Math.floorMod(i - 1, road.size());
       boolean lowered = !Double.isNaN(after);
+      if (!lowered && atLimit(i) && limits.isApex(i)) {
+        reachApex(i, previous);
+      }
       double ax = Double.NaN;
       if (lowered || profile.speed[previous] > profile.speed[i]) {
         ax = brakeAt(i, profile.speed[i], lowered);
@@ -58,6 +63,29 @@ final class BackwardPass {
               ? slowDown(i, previous, ax, after)
               : Double.NaN;
     }
+  }
+
+  private boolean atLimit(int i) {
+    return profile.limit[i] == LapLimit.CORNERING
+        && Math.abs(profile.speed[i] - limits.speed(i)) < 1e-9 * limits.speed(i);
+  }
+
+  /**
+   * Ends at the slowest point of a corner, which lies between stations: it is reached at zero
+   * acceleration, and the mean acceleration from the station before to there is half of that
+   * station's.
+   */
+  private void reachApex(int i, int previous) {
+    double offset = limits.apexOffset(i);
+    double energy = limits.apexEnergy(i);
+    int before = offset > 0 ? i : previous;
+    double distance = (offset > 0 ? offset : 1 + offset) * road.spacing();
+    double ax = brakeAt(before, Math.sqrt(2 * energy), false);
+    if (Double.isNaN(ax)) {
+      return;
+    }
+    double reached = Math.sqrt(2 * (energy - 0.5 * ax * distance));
+    profile.speed[before] = Math.min(profile.speed[before], reached);
   }
 
   /** Brake limit at a station; leaves it in {@code limit}. NaN when there is no trim there. */

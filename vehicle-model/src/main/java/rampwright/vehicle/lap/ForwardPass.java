@@ -21,6 +21,7 @@ final class ForwardPass {
   private final Profile profile;
   private final TrimState level = new TrimState();
   private final TrimState limit = new TrimState();
+  private final TrimState ahead = new TrimState();
 
   private int gear;
   private double shiftLeft;
@@ -55,14 +56,46 @@ final class ForwardPass {
     for (int k = 0; k < road.size(); k++) {
       int i = Math.floorMod(start + k, road.size());
       double speed = Math.sqrt(2 * energy);
-      boolean capped = k > 0 && speed >= limits.speed(i) || k == 0 && limits.binds(i);
+      boolean capped = speed >= limits.speed(i) && limits.binds(i);
       if (speed >= limits.speed(i)) {
         speed = limits.speed(i);
         before = Double.NaN;
       }
-      energy = step(i, speed, capped);
+      energy = capped && limits.isApex(i) ? leaveApex(i) : step(i, speed, capped);
     }
     return Math.min(Math.sqrt(2 * energy), limits.speed(start));
+  }
+
+  /**
+   * Starts from the slowest point of a corner, which lies between stations: it is reached at zero
+   * acceleration, and the mean acceleration from there to the next station is half of that
+   * station's.
+   */
+  private double leaveApex(int i) {
+    double offset = limits.apexOffset(i);
+    double energy = limits.apexEnergy(i);
+    if (offset > 0) {
+      step(i, limits.speed(i), true);
+      before = Double.NaN;
+      shiftLeft = 0;
+      int next = i + 1 < road.size() ? i + 1 : 0;
+      double ax = driveLimitAhead(next, Math.sqrt(2 * energy));
+      return energy + 0.5 * Math.max(0, ax) * (1 - offset) * road.spacing();
+    }
+    double ax = driveLimitAhead(i, Math.sqrt(2 * energy));
+    double reached = energy - 0.5 * Math.max(0, ax) * offset * road.spacing();
+    return step(i, Math.min(limits.speed(i), Math.sqrt(2 * reached)), true);
+  }
+
+  /** Acceleration of the drive limit at a station, nothing saved; 0 where there is none. */
+  private double driveLimitAhead(int i, double speed) {
+    solver.place(road, i);
+    limits.load(i, ahead);
+    if (!solver.constantSpeed(speed, ahead, ahead)) {
+      return 0;
+    }
+    solver.driveLimit(ahead, gear, growthMax, limit);
+    return limit.ax;
   }
 
   /** Saves the drive limit at a station and returns the energy at the next. */
@@ -109,7 +142,6 @@ final class ForwardPass {
             Math.sqrt(2 * Math.max(energy + ax * road.spacing(), LEAST_ENERGY)),
             limits.speed(next));
     solver.place(road, next);
-    TrimState ahead = limit;
     if (!solver.constantSpeed(speed, level, ahead)) {
       return ax;
     }

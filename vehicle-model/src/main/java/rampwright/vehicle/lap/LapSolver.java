@@ -47,18 +47,8 @@ public final class LapSolver {
       speed = arrival;
       arrival = forward.run(start, speed);
     }
-    new BackwardPass(road, solver, gearbox, profile, request.driver(), request.form()).run(start);
-    Trace trace =
-        new TraceWriter(road, solver, gearbox, request.car().driveline(), profile).write();
-    double time = trace.get(Channel.TIME, road.size() - 1);
-    if (road.closed()) {
-      time += interval(road.spacing(), profile.speed[road.size() - 1], profile.speed[0]);
-    }
-    return new Lap(request, time, road, trace);
-  }
-
-  /** Time (s) between two stations at constant acceleration. */
-  static double interval(double spacing, double from, double to) {
-    return 2 * spacing / (from + to);
+    new BackwardPass(road, solver, gearbox, limits, profile, request).run(start);
+    TraceWriter writer = new TraceWriter(road, solver, gearbox, request.car().driveline(), profile);
+    return new Lap(request, writer.write(), road, writer.trace());
   }
 }

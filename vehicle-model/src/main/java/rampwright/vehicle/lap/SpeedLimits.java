@@ -104,6 +104,39 @@ final class SpeedLimits {
     return found.speed[i] < topSpeed;
   }
 
+  /** Returns whether no neighbour of a station has a lower limit. */
+  boolean isApex(int i) {
+    return binds(i) && speed(i) <= speed(before(i)) && speed(i) <= speed(after(i));
+  }
+
+  /**
+   * Returns where the limit is lowest near an apex, as a share of the spacing after the station:
+   * the vertex of the parabola through the kinetic energies of the station and its neighbours.
+   */
+  double apexOffset(int i) {
+    double slope = (energy(after(i)) - energy(before(i))) / 2;
+    double bend = energy(after(i)) - 2 * energy(i) + energy(before(i));
+    return bend > 1e-12 ? Math.max(-0.5, Math.min(0.5, -slope / bend)) : 0;
+  }
+
+  /** Returns the kinetic energy per mass (m²/s²) of the lowest limit near an apex. */
+  double apexEnergy(int i) {
+    double slope = (energy(after(i)) - energy(before(i))) / 2;
+    return energy(i) + 0.5 * slope * apexOffset(i);
+  }
+
+  private double energy(int i) {
+    return 0.5 * found.speed[i] * found.speed[i];
+  }
+
+  private int before(int i) {
+    return i > 0 ? i - 1 : road.closed() ? road.size() - 1 : 0;
+  }
+
+  private int after(int i) {
+    return i < road.size() - 1 ? i + 1 : road.closed() ? 0 : i;
+  }
+
   void load(int i, TrimState out) {
     found.load(i, out);
   }

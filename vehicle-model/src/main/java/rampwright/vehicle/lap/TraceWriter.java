@@ -29,12 +29,13 @@ final class TraceWriter {
     this.trace = new Trace(road.size());
   }
 
-  Trace write() {
-    double time = 0;
+  Trace trace() {
+    return trace;
+  }
+
+  /** Writes every station and returns the lap time (s). */
+  double write() {
     for (int i = 0; i < road.size(); i++) {
-      if (i > 0) {
-        time += LapSolver.interval(road.spacing(), profile.speed[i - 1], profile.speed[i]);
-      }
       solver.place(road, i);
       profile.load(i, state);
       int gear = profile.gear[i];
@@ -42,9 +43,42 @@ final class TraceWriter {
         gear = gearbox.best(solver.rollingCageSpeed(profile.speed[i]));
         follow(i, gear);
       }
-      row(i, time, gear);
+      row(i, gear);
     }
-    return trace;
+    double time = 0;
+    int intervals = road.closed() ? road.size() : road.size() - 1;
+    for (int i = 0; i < intervals; i++) {
+      set(Channel.TIME, i, time);
+      time += interval(i, i + 1 < road.size() ? i + 1 : 0);
+    }
+    if (!road.closed()) {
+      set(Channel.TIME, intervals, time);
+    }
+    return time;
+  }
+
+  /**
+   * Time (s) from one station to the next. Where drive turns into braking between the two, both
+   * accelerations are held up to the point where they meet; elsewhere the kinetic energy is taken
+   * as the cubic through both ends and the time integrated by Simpson's rule.
+   */
+  private double interval(int i, int j) {
+    double ds = road.spacing();
+    double from = profile.speed[i];
+    double to = profile.speed[j];
+    double axFrom = trace.get(Channel.AX, i);
+    double axTo = trace.get(Channel.AX, j);
+    double gain = (to * to - from * from) / 2;
+    if (axFrom > 0 && axTo < 0 && trace.get(Channel.BRAKE_TORQUE, j) > 0) {
+      double share = (gain - axTo * ds) / ((axFrom - axTo) * ds);
+      if (share > 0 && share < 1) {
+        double top = Math.sqrt(from * from + 2 * axFrom * share * ds);
+        return 2 * ds * (share / (from + top) + (1 - share) / (top + to));
+      }
+    }
+    double middle = (from * from + to * to) / 2 + ds / 4 * (axFrom - axTo);
+    double least = Math.min(from, to) * Math.min(from, to) / 4;
+    return ds / 6 * (1 / from + 4 / Math.sqrt(Math.max(least, middle)) + 1 / to);
   }
 
   /** Solves for the acceleration that the neighbouring speeds ask for. */
@@ -70,11 +104,10 @@ final class TraceWriter {
     }
   }
 
-  private void row(int i, double time, int gear) {
+  private void row(int i, int gear) {
     TrimResults r = solver.results();
     double speed = profile.speed[i];
     set(Channel.DISTANCE, i, i * road.spacing());
-    set(Channel.TIME, i, time);
     set(Channel.SPEED, i, speed);
     set(Channel.CURVATURE, i, road.curvature(i));
     set(Channel.CURVATURE_GRADIENT, i, road.curvatureGradient(i));

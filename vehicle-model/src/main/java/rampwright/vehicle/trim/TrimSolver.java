@@ -20,6 +20,12 @@ public final class TrimSolver {
   /** Steps in which torque is taken off when lifting the throttle at once has no trim. */
   private static final int LIFT_STEPS = 20;
 
+  /** Constant-speed trims of neighbouring points differ by less than this in mean slip... */
+  private static final double NEAR_SLIP = 0.015;
+
+  /** ...and in sideslip (rad); a larger step means another branch. */
+  private static final double NEAR_ANGLE = 0.03;
+
   private final Car car;
   private final Driveline engineSide;
   private final ForceBalance forces;
@@ -100,15 +106,25 @@ public final class TrimSolver {
     return driveStart.coasting(speed, work) && driveStart.constantSpeed(work, out);
   }
 
-  /** Solves for constant speed from a trim nearby; falls back on the way from straight running. */
+  /**
+   * Solves for constant speed from such a trim nearby. The answer is kept when it is close to the
+   * start and torque still brings speed there; otherwise the path is followed from straight
+   * running.
+   */
   public boolean constantSpeed(double speed, TrimState near, TrimState out) {
+    double meanSlip = near.meanSlip;
+    double sideslip = near.sideslip;
+    boolean usable = !near.braking;
     out.copyFrom(near);
     out.speed = speed;
     out.ax = 0;
     boolean solved =
-        !near.braking
+        usable
             && drive.atAcceleration(out, 0)
-            && out.determinantSign == driveStart.referenceSign;
+            && out.determinantSign == driveStart.referenceSign
+            && out.axRate > 0
+            && Math.abs(out.meanSlip - meanSlip) < NEAR_SLIP
+            && Math.abs(out.sideslip - sideslip) < NEAR_ANGLE;
     return solved || constantSpeed(speed, out);
   }
 
@@ -221,12 +237,14 @@ public final class TrimSolver {
     out.copyFrom(level);
     double overrun = engineSide.overrunTorque(gear, rollingCageSpeed(level.speed));
     if (drive.atAcceleration(out, ax) && out.cageTorque >= overrun) {
-      return true;
+      return out.determinantSign == driveStart.referenceSign;
     }
     brake.input = overrun;
     out.copyFrom(level);
     Arrays.fill(out.slip, 0);
-    return brake.atTotalTorque(out, overrun) && brake.atAcceleration(out, ax);
+    return brake.atTotalTorque(out, overrun)
+        && brake.atAcceleration(out, ax)
+        && out.brakeTorque >= 0;
   }
 
   /**
