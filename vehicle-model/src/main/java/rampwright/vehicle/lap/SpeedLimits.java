@@ -63,9 +63,11 @@ final class SpeedLimits {
       double curvature = Math.abs(road.curvature(i));
       boolean solved =
           haveNear && solver.cornerLimit(near, firstSpeed(i, curvature), topSpeed, growthMax, out);
-      if (!solved) {
-        double from = Math.min(topSpeed, Math.sqrt(GENTLE / Math.max(1e-9, curvature)));
+      // where the curvature changes fast, the speed that suits the curvature may be too high
+      double from = Math.min(topSpeed, Math.sqrt(GENTLE / Math.max(1e-9, curvature)));
+      while (!solved && from > 1) {
         solved = solver.cornerLimit(null, from, topSpeed, growthMax, out);
+        from *= 0.7;
       }
       if (!solved) {
         throw InvalidInput.value(
@@ -91,7 +93,9 @@ final class SpeedLimits {
       return topSpeed;
     }
     double expected = found.speed[i - 1] * Math.min(2, Math.sqrt(before / curvature));
-    return BELOW * Math.min(topSpeed, expected);
+    // after a straight the station before says nothing
+    double gentle = Math.sqrt(GENTLE / curvature);
+    return BELOW * Math.min(topSpeed, Math.max(gentle, expected));
   }
 
   /** Returns the limit (m/s) at a station. */
