@@ -39,6 +39,7 @@ public final class TrimSolver {
   private final SlipMarch brakeMarch;
   private final FullLoad fullLoad = new FullLoad();
   private final FullBrakes fullBrakes = new FullBrakes();
+  private final GivenTorque givenTorque = new GivenTorque();
   private final TrimState work = new TrimState();
   private final TrimState trial = new TrimState();
   private final TrimResults driveResults;
@@ -220,6 +221,23 @@ public final class TrimSolver {
         : corner.findFrom(near, from, topSpeed, growthMax, out);
   }
 
+  /**
+   * Follows the branch from constant speed to a cage torque with the brakes off.
+   *
+   * @return false when the branch does not reach it
+   */
+  public boolean reachCageTorque(TrimState level, double torque, TrimState out) {
+    if (torque <= level.cageTorque) {
+      return lift(level, torque, Double.POSITIVE_INFINITY, out);
+    }
+    work.copyFrom(level);
+    drive.atAcceleration(work, 0);
+    givenTorque.torque = torque;
+    return driveMarch.find(
+            work, givenTorque, Double.POSITIVE_INFINITY, driveStart.referenceSign, out)
+        == TrimLimit.TORQUE;
+  }
+
   /** Solves for a cage torque with the brakes off, from a trim nearby; returns whether it did. */
   public boolean atCageTorque(TrimState near, double torque, TrimState out) {
     out.copyFrom(near);
@@ -282,6 +300,21 @@ public final class TrimSolver {
     @Override
     public boolean solve(Equilibrium equilibrium, TrimState state) {
       return equilibrium.atFullLoad(state, gear);
+    }
+  }
+
+  /** Torque left until a given cage torque. */
+  private static final class GivenTorque implements SlipMarch.TorqueCap {
+    private double torque;
+
+    @Override
+    public double headroom(TrimState state) {
+      return torque - state.cageTorque;
+    }
+
+    @Override
+    public boolean solve(Equilibrium equilibrium, TrimState state) {
+      return equilibrium.atTotalTorque(state, torque);
     }
   }
 
