@@ -29,9 +29,9 @@ final class DifferentialEquation {
   }
 
   private final Differential law;
-  private final double[] differenceOf;
-  private final double[] speedOf;
-  private final double[] cageOf;
+  private final LinearForm differenceOf;
+  private final LinearForm speedOf;
+  private final LinearForm cageOf;
   private final double differenceByInput;
   private final double cageByInput;
 
@@ -47,6 +47,9 @@ final class DifferentialEquation {
   /** Largest friction torque difference (N·m). */
   double capacity;
 
+  private double capacitySlope;
+  private double viscousSlope;
+
   /** Sticking or sliding at the last evaluation. */
   State state;
 
@@ -61,10 +64,10 @@ final class DifferentialEquation {
       double[] cageOf,
       double cageByInput) {
     this.law = law;
-    this.differenceOf = differenceOf;
+    this.differenceOf = LinearForm.of(differenceOf);
     this.differenceByInput = differenceByInput;
-    this.speedOf = speedOf;
-    this.cageOf = cageOf;
+    this.speedOf = LinearForm.of(speedOf);
+    this.cageOf = LinearForm.of(cageOf);
     this.cageByInput = cageByInput;
   }
 
@@ -77,10 +80,12 @@ final class DifferentialEquation {
    * @param torqueScale torque that counts as one in the residual (N·m)
    */
   void evaluate(double[] value, double input, double speedScale, double torqueScale) {
-    torqueDifference = dot(differenceOf, value) + differenceByInput * input;
-    speedDifference = dot(speedOf, value);
-    cageTorque = dot(cageOf, value) + cageByInput * input;
+    torqueDifference = differenceOf.apply(value) + differenceByInput * input;
+    speedDifference = speedOf.apply(value);
+    cageTorque = cageOf.apply(value) + cageByInput * input;
     capacity = law.capacity(cageTorque);
+    capacitySlope = law.capacitySlope(cageTorque);
+    viscousSlope = law.viscousSlope(speedDifference);
     double friction = torqueDifference - law.viscousTorque(speedDifference);
     if (capacity == Double.POSITIVE_INFINITY) {
       state = State.STICKING;
@@ -101,15 +106,15 @@ final class DifferentialEquation {
 
   /** Returns the change of the residual for a change of the force balance, state held. */
   double change(double[] change, double speedScale, double torqueScale) {
-    double dSpeed = dot(speedOf, change);
+    double dSpeed = speedOf.apply(change);
     if (state == State.STICKING) {
       return dSpeed / speedScale;
     }
-    double dFriction = dot(differenceOf, change) - law.viscousSlope(speedDifference) * dSpeed;
+    double dFriction = differenceOf.apply(change) - viscousSlope * dSpeed;
     if (state == State.FRICTIONLESS) {
       return -dFriction / torqueScale;
     }
-    double dCapacity = law.capacitySlope(cageTorque) * dot(cageOf, change);
+    double dCapacity = capacitySlope * cageOf.apply(change);
     return (state == State.LEFT_FASTER ? dCapacity - dFriction : -dCapacity - dFriction)
         / torqueScale;
   }
@@ -121,13 +126,5 @@ final class DifferentialEquation {
         Math.abs(speedDifference),
         capacity,
         state == State.STICKING);
-  }
-
-  static double dot(double[] coefficients, double[] values) {
-    double sum = 0;
-    for (int j = ForceBalance.TORQUE; j < ForceBalance.SIZE; j++) {
-      sum += coefficients[j] * values[j];
-    }
-    return sum;
   }
 }

@@ -34,13 +34,13 @@ final class DrivelineEquations {
   final DifferentialEquation[] differentials;
 
   /** Speed of the case that the engine turns, as a function of the force balance. */
-  final double[] cageSpeedOf = new double[ForceBalance.SIZE];
+  final LinearForm cageSpeedOf;
 
   /** Sum of the torques of the active wheels, as a function of the force balance. */
-  final double[] totalTorqueOf = new double[ForceBalance.SIZE];
+  final LinearForm totalTorqueOf;
 
   /** Axle that only the brakes act on: cage torque it would have, which must be zero; or null. */
-  final double[] undrivenCageOf;
+  final LinearForm undrivenCageOf;
 
   final double undrivenCageByInput;
 
@@ -58,12 +58,16 @@ final class DrivelineEquations {
     } else {
       activeWheels = frontDriven ? new int[] {0, 1} : new int[] {2, 3};
     }
+    double[] total = new double[ForceBalance.SIZE];
     for (int i : activeWheels) {
-      totalTorqueOf[ForceBalance.TORQUE + i] = 1;
+      total[ForceBalance.TORQUE + i] = 1;
     }
+    totalTorqueOf = LinearForm.of(total);
+    double[] cageSpeed = new double[ForceBalance.SIZE];
     for (int i = 0; i < 4; i++) {
-      cageSpeedOf[ForceBalance.SPEED + i] = (i < 2 ? split : 1 - split) / 2;
+      cageSpeed[ForceBalance.SPEED + i] = (i < 2 ? split : 1 - split) / 2;
     }
+    cageSpeedOf = LinearForm.of(cageSpeed);
     double[] frontCage = axleCage(0, frontBrake);
     double[] rearCage = axleCage(2, rearBrake);
     front =
@@ -79,7 +83,7 @@ final class DrivelineEquations {
             ? centre(set.centre(), split, frontCage, rearCage, frontBrake, rearBrake)
             : null;
     boolean undriven = braking && centre == null;
-    undrivenCageOf = undriven ? (frontDriven ? rearCage : frontCage) : null;
+    undrivenCageOf = undriven ? LinearForm.of(frontDriven ? rearCage : frontCage) : null;
     undrivenCageByInput = undriven ? (frontDriven ? rearBrake : frontBrake) : 0;
     differentials =
         Stream.of(front, centre, rear)
@@ -93,11 +97,6 @@ final class DrivelineEquations {
 
   static DrivelineEquations braking(Car car, DifferentialSet set) {
     return new DrivelineEquations(car, set, true);
-  }
-
-  /** Returns the total brake torque (N·m) that the wheels take beyond the input torque. */
-  double brakeTorque(double[] value, double input) {
-    return braking ? input - DifferentialEquation.dot(totalTorqueOf, value) : 0;
   }
 
   /** Cage torque of an axle: its wheels' torque plus its share of the brake torque. */

@@ -1,5 +1,6 @@
 package rampwright.vehicle.trim;
 
+import java.util.Arrays;
 import rampwright.vehicle.driveline.Driveline;
 
 /**
@@ -31,8 +32,14 @@ final class Equilibrium {
 
   private static final int MOST_ITERATIONS = 30;
 
-  /** Largest scaled residual of an accepted trim. */
-  private static final double TOLERANCE = 1e-10;
+  /**
+   * Scaled residual from which one more linear correction is exact to working precision: Newton's
+   * error is quadratic, so what is left is of the order of the square.
+   */
+  private static final double CLOSE = 1e-7;
+
+  /** Scaled residual beyond which no iteration is tried. */
+  private static final double HOPELESS = 1e6;
 
   private static final double LARGEST_ANGLE_STEP = 0.12;
   private static final double LARGEST_SLIP_STEP = 0.08;
@@ -41,10 +48,14 @@ final class Equilibrium {
   final DrivelineEquations driveline;
   private final Driveline engineSide;
   private final SmallSystem system = new SmallSystem(7, 2);
+  private final double[] torqueColumn = new double[7];
+  private final double[] cageSpeedColumn = new double[7];
   private final int size;
   private final double[] rightSide = new double[7];
 
   // workspace of one evaluation
+  private double cosBeta;
+  private double sinBeta;
   private double fx;
   private double fy;
   private double speedScale;
@@ -109,15 +120,16 @@ final class Equilibrium {
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       evaluate(state);
       double worst = assemble(state);
-      if (!(worst < 1e6)) {
+      if (!(worst < HOPELESS)) {
         return false;
       }
-      if (worst < TOLERANCE) {
+      boolean last = worst < CLOSE;
+      if (!system.solve(size, last ? 2 : 1)) {
+        return false;
+      }
+      if (last) {
         finish(state);
         return true;
-      }
-      if (!system.solve(size, 1)) {
-        return false;
       }
       step(state);
     }
@@ -126,13 +138,13 @@ final class Equilibrium {
 
   private void evaluate(TrimState state) {
     double v = state.speed;
-    double cosBeta = Math.cos(state.sideslip);
-    double sinBeta = Math.sin(state.sideslip);
+    cosBeta = Math.cos(state.sideslip);
+    sinBeta = Math.sin(state.sideslip);
     double tangential = forces.tangential(v, state.ax);
     double normal = forces.normal(v);
     fx = tangential * cosBeta - normal * sinBeta;
     fy = tangential * sinBeta + normal * cosBeta;
-    forces.evaluate(v, state.sideslip, forces.curvature, state.steer, fx, fy, state.slip);
+    forces.evaluate(v, sinBeta, cosBeta, forces.curvature, state.steer, fx, fy, state.slip);
     double radius = forces.radius(driveline.activeWheels[driveline.activeWheels.length - 1]);
     speedScale = 0.05 * v / radius;
     torqueScale = forces.weight * radius;
@@ -157,23 +169,19 @@ final class Equilibrium {
     }
     if (driveline.undrivenCageOf != null) {
       rightSide[row++] =
-          -(DifferentialEquation.dot(driveline.undrivenCageOf, forces.value)
-                  + driveline.undrivenCageByInput * input)
+          -(driveline.undrivenCageOf.apply(forces.value) + driveline.undrivenCageByInput * input)
               / torqueScale;
     }
     if (row < size) {
       rightSide[row] = -closingResidual(state);
     }
 
-    double cosBeta = Math.cos(state.sideslip);
-    double sinBeta = Math.sin(state.sideslip);
-    column(state, 0, 1, 0, -fy, fx, 0, 0);
-    column(state, 1, 0, 1, 0, 0, 0, 0);
+    column(0, 1, 0, -fy, fx, 0, 0);
+    column(1, 0, 1, 0, 0, 0, 0);
     if (closing == Closing.ARC) {
       double dTangential = forces.tangentialBySpeed(v);
       double dNormal = forces.normalBySpeed(v);
       column(
-          state,
           2,
           0,
           0,
@@ -182,25 +190,25 @@ final class Equilibrium {
           1,
           2 * v * forces.curvatureGradient);
     } else {
-      column(state, 2, 0, 0, cosBeta, sinBeta, 0, forces.curvature);
+      column(2, 0, 0, cosBeta, sinBeta, 0, forces.curvature);
     }
     for (int j = 0; j < driveline.activeWheels.length; j++) {
       forces.slipDirection(driveline.activeWheels[j]);
-      storeColumn(state, 3 + j, 0, 0, 0);
+      storeColumn(3 + j, 0, 0, 0);
     }
     double worst = 0;
     for (int i = 0; i < size; i++) {
       system.a[system.rightHandSide(i, 0)] = rightSide[i];
-      worst = Math.max(worst, Math.abs(rightSide[i]));
-      if (Double.isNaN(rightSide[i])) {
-        return Double.NaN;
+      system.a[system.rightHandSide(i, 1)] = i == size - 1 ? 1 : 0;
+      double miss = Math.abs(rightSide[i]);
+      if (!(miss <= worst)) {
+        worst = miss;
       }
     }
     return worst;
   }
 
   private void column(
-      TrimState state,
       int j,
       double dBeta,
       double dDelta,
@@ -209,11 +217,10 @@ final class Equilibrium {
       double dSpeed,
       double dYawAcceleration) {
     forces.direction(dBeta, 0, dDelta, dFx, dFy, dSpeed);
-    storeColumn(state, j, dFx, dFy, dYawAcceleration);
+    storeColumn(j, dFx, dFy, dYawAcceleration);
   }
 
-  private void storeColumn(
-      TrimState state, int j, double dFx, double dFy, double dYawAcceleration) {
+  private void storeColumn(int j, double dFx, double dFy, double dYawAcceleration) {
     double[] a = system.a;
     double[] change = forces.change;
     double perForce = 1 / forces.weight;
@@ -228,21 +235,21 @@ final class Equilibrium {
       a[system.at(row++, j)] = differential.change(change, speedScale, torqueScale);
     }
     if (driveline.undrivenCageOf != null) {
-      a[system.at(row++, j)] =
-          DifferentialEquation.dot(driveline.undrivenCageOf, change) / torqueScale;
+      a[system.at(row++, j)] = driveline.undrivenCageOf.apply(change) / torqueScale;
     }
-    a[system.at(row, j)] = closingChange(state, j);
+    torqueColumn[j] = driveline.totalTorqueOf.apply(change);
+    cageSpeedColumn[j] = driveline.cageSpeedOf.apply(change);
+    a[system.at(row, j)] = closingChange(j);
   }
 
   private double closingResidual(TrimState state) {
     return switch (closing) {
       case MEAN_SLIP -> meanSlip(state) - target;
-      case TOTAL_TORQUE ->
-          (DifferentialEquation.dot(driveline.totalTorqueOf, forces.value) - target) / torqueScale;
+      case TOTAL_TORQUE -> (driveline.totalTorqueOf.apply(forces.value) - target) / torqueScale;
       case ACCELERATION -> (state.ax - target) / 10;
       case FULL_LOAD -> {
-        double cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
-        double torque = DifferentialEquation.dot(driveline.totalTorqueOf, forces.value);
+        double cageSpeed = driveline.cageSpeedOf.apply(forces.value);
+        double torque = driveline.totalTorqueOf.apply(forces.value);
         yield (torque - engineSide.fullTorque(gear, cageSpeed)) / torqueScale;
       }
       case ARC -> {
@@ -255,18 +262,15 @@ final class Equilibrium {
     };
   }
 
-  private double closingChange(TrimState state, int j) {
+  private double closingChange(int j) {
     return switch (closing) {
       case MEAN_SLIP -> j < 3 ? 0 : 1.0 / driveline.activeWheels.length;
-      case TOTAL_TORQUE ->
-          DifferentialEquation.dot(driveline.totalTorqueOf, forces.change) / torqueScale;
+      case TOTAL_TORQUE -> torqueColumn[j] / torqueScale;
       case ACCELERATION -> j == 2 ? 0.1 : 0;
       case FULL_LOAD -> {
-        double cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
+        double cageSpeed = driveline.cageSpeedOf.apply(forces.value);
         double slope = engineSide.fullTorqueSlope(gear, cageSpeed);
-        yield (DifferentialEquation.dot(driveline.totalTorqueOf, forces.change)
-                - slope * DifferentialEquation.dot(driveline.cageSpeedOf, forces.change))
-            / torqueScale;
+        yield (torqueColumn[j] - slope * cageSpeedColumn[j]) / torqueScale;
       }
       case ARC -> arcDirection[j] / arcScale[j];
     };
@@ -295,12 +299,12 @@ final class Equilibrium {
   private void turnArc() {
     double norm = 0;
     for (int j = 0; j < size; j++) {
-      double component = solution(j) / arcScale[j];
+      double component = tangent(j) / arcScale[j];
       norm += component * component;
     }
     norm = Math.sqrt(norm);
     for (int j = 0; j < size; j++) {
-      arcDirection[j] = solution(j) / arcScale[j] / norm;
+      arcDirection[j] = tangent(j) / arcScale[j] / norm;
     }
   }
 
@@ -319,6 +323,10 @@ final class Equilibrium {
 
   private double solution(int j) {
     return system.a[system.rightHandSide(j, 0)];
+  }
+
+  private double tangent(int j) {
+    return system.a[system.rightHandSide(j, 1)];
   }
 
   private void step(TrimState state) {
@@ -342,57 +350,41 @@ final class Equilibrium {
     }
   }
 
-  /** Stores results and, from the factorised matrix at the solution, the tangent of the branch. */
+  /**
+   * Applies the last correction, to the results as well, and stores the tangent of the branch: the
+   * second solution is the change of the unknowns with the closing condition, and the change of the
+   * mean slip along it relates the two determinants by Cramer's rule.
+   */
   private void finish(TrimState state) {
+    double torque = driveline.totalTorqueOf.apply(forces.value);
+    double cageSpeed = driveline.cageSpeedOf.apply(forces.value);
+    double meanSlipRate = 0;
+    double torqueRate = 0;
+    for (int j = 0; j < size; j++) {
+      torque += torqueColumn[j] * solution(j);
+      cageSpeed += cageSpeedColumn[j] * solution(j);
+      torqueRate += torqueColumn[j] * tangent(j);
+      meanSlipRate += j < 3 ? 0 : tangent(j) / driveline.activeWheels.length;
+    }
+    step(state);
     state.braking = driveline.braking;
     state.meanSlip = meanSlip(state);
-    double total = DifferentialEquation.dot(driveline.totalTorqueOf, forces.value);
-    state.cageTorque = driveline.braking ? input : total;
-    state.brakeTorque = driveline.brakeTorque(forces.value, input);
-    state.cageSpeed = DifferentialEquation.dot(driveline.cageSpeedOf, forces.value);
+    state.cageTorque = driveline.braking ? input : torque;
+    state.brakeTorque = driveline.braking ? input - torque : 0;
+    state.cageSpeed = cageSpeed;
     state.sigma = Double.NaN;
-    tangent(state);
-  }
-
-  private void tangent(TrimState state) {
-    int last = size - 1;
-    for (int i = 0; i < size; i++) {
-      system.a[system.rightHandSide(i, 0)] = i == last ? 1 : 0;
-    }
-    if (closing != Closing.MEAN_SLIP && closing != Closing.ARC) {
-      for (int j = 0; j < size; j++) {
-        system.a[system.at(last, j)] = j < 3 ? 0 : 1.0 / driveline.activeWheels.length;
-      }
-    }
-    boolean solved = system.solve(size, 1);
     if (closing == Closing.ARC) {
       turnArc();
       return;
     }
-    state.determinantSign = solved ? system.determinantSign : 0;
-    if (!solved) {
-      return;
-    }
-    state.sideslipRate = solution(0);
-    state.steerRate = solution(1);
-    state.axRate = solution(2);
-    java.util.Arrays.fill(state.slipRate, 0);
+    state.determinantSign = system.determinantSign * (int) Math.signum(meanSlipRate);
+    state.sideslipRate = tangent(0) / meanSlipRate;
+    state.steerRate = tangent(1) / meanSlipRate;
+    state.axRate = tangent(2) / meanSlipRate;
+    Arrays.fill(state.slipRate, 0);
     for (int j = 3; j < size; j++) {
-      state.slipRate[driveline.activeWheels[j - 3]] = solution(j);
+      state.slipRate[driveline.activeWheels[j - 3]] = tangent(j) / meanSlipRate;
     }
-    double cosBeta = Math.cos(state.sideslip);
-    double sinBeta = Math.sin(state.sideslip);
-    forces.direction(
-        state.sideslipRate,
-        0,
-        state.steerRate,
-        -fy * state.sideslipRate + cosBeta * state.axRate,
-        fx * state.sideslipRate + sinBeta * state.axRate,
-        0);
-    double rate = DifferentialEquation.dot(driveline.totalTorqueOf, forces.change);
-    for (int i : driveline.activeWheels) {
-      rate += forces.tyre[i].fxSlip * forces.radius(i) * state.slipRate[i];
-    }
-    state.torqueRate = driveline.braking ? -rate : rate;
+    state.torqueRate = (driveline.braking ? -torqueRate : torqueRate) / meanSlipRate;
   }
 }

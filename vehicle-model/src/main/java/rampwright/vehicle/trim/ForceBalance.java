@@ -164,12 +164,21 @@ final class ForceBalance {
     return 2 * v * curvature * cosBank;
   }
 
-  /** Evaluates forces, torques and speeds; the arguments are described at the class. */
+  /**
+   * Evaluates everything; sideslip comes as sine and cosine, the rest as described at the class.
+   */
   void evaluate(
-      double v, double beta, double k, double delta, double fx, double fy, double[] slips) {
+      double v,
+      double sineBeta,
+      double cosineBeta,
+      double k,
+      double delta,
+      double fx,
+      double fy,
+      double[] slips) {
     speed = v;
-    sinBeta = Math.sin(beta);
-    cosBeta = Math.cos(beta);
+    sinBeta = sineBeta;
+    cosBeta = cosineBeta;
     sinSteer = Math.sin(delta);
     cosSteer = Math.cos(delta);
     double vertical = curvature * sinBank + verticalCurvature;

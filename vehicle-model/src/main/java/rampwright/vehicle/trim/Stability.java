@@ -112,10 +112,8 @@ final class Stability {
       a[system.at(row++, column)] = sign * differential.change(change, speedScale, torqueScale);
     }
     if (driveline.undrivenCageOf != null) {
-      a[system.at(row++, column)] =
-          sign * DifferentialEquation.dot(driveline.undrivenCageOf, change) / torqueScale;
+      a[system.at(row++, column)] = sign * driveline.undrivenCageOf.apply(change) / torqueScale;
     }
-    a[system.at(row, column)] =
-        sign * DifferentialEquation.dot(driveline.totalTorqueOf, change) / torqueScale;
+    a[system.at(row, column)] = sign * driveline.totalTorqueOf.apply(change) / torqueScale;
   }
 }
