@@ -1,0 +1,54 @@
+package rampwright.samples;
+
+import java.io.FileNotFoundException;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.List;
+
+/** The samples, wherever the jar with them is. */
+public final class SampleFiles {
+  /** Folder of the samples on the class path. */
+  public static final String BASE = "rampwright/samples/";
+
+  /** Folder of the bad inputs below it. */
+  public static final String FAILURES = "failure/";
+
+  private static final String INDEX = "index.csv";
+
+  private SampleFiles() {}
+
+  /** Returns all samples in the order of the index; bad inputs are not among them. */
+  public static List<SampleFile> list() {
+    try (InputStream in = open(INDEX)) {
+      return new String(in.readAllBytes(), StandardCharsets.UTF_8)
+          .lines()
+          .skip(1)
+          .map(line -> line.split(",", 3))
+          .map(cells -> new SampleFile(cells[0], cells[1], cells[2]))
+          .toList();
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
+  /** Returns the samples of one kind. */
+  public static List<SampleFile> list(String kind) {
+    return list().stream().filter(sample -> sample.kind().equals(kind)).toList();
+  }
+
+  /**
+   * Opens a file below the samples.
+   *
+   * @param path with forward slashes, for example {@code circuits/velmoor.csv}
+   * @throws FileNotFoundException when there is no such file
+   */
+  public static InputStream open(String path) throws IOException {
+    InputStream in = SampleFiles.class.getClassLoader().getResourceAsStream(BASE + path);
+    if (in == null) {
+      throw new FileNotFoundException(path);
+    }
+    return in;
+  }
+}
