@@ -93,13 +93,13 @@ final class BackwardPass {
     solver.place(road, i);
     gear = gearbox.best(solver.rollingCageSpeed(speed));
     if (!haveLevel) {
-      profile.load(i, level);
-      level.braking = false;
+      limits.load(i, level);
+      solver.forget();
     }
-    if (!solver.constantSpeed(speed, level, level)) {
+    TrimLimit why = solver.nextBrakeLimit(speed, level, gear, growthMax(i, speed), limit);
+    if (why == null) {
       return Double.NaN;
     }
-    TrimLimit why = solver.brakeLimit(level, gear, growthMax(i, speed), limit);
     reason = why == TrimLimit.DRIVER ? LapLimit.SLIDE_ON_BRAKES : LapLimit.BRAKING;
     return Math.min(0, limit.ax);
   }

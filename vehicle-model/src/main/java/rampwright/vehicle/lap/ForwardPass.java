@@ -13,6 +13,11 @@ final class ForwardPass {
   /** The kinetic energy per mass does not fall below that of 1 m/s. */
   private static final double LEAST_ENERGY = 0.5;
 
+  /** Fall of the drive limit (m/s²) between stations that only a jump of the limit explains. */
+  private static final double JUMP = 1.0;
+
+  private static final int THRESHOLD_STEPS = 12;
+
   private final Road road;
   private final TrimSolver solver;
   private final Gearbox gearbox;
@@ -26,6 +31,8 @@ final class ForwardPass {
   private int gear;
   private double shiftLeft;
   private double before;
+  private double axBefore;
+  private double energyBefore;
 
   ForwardPass(
       Road road,
@@ -51,7 +58,9 @@ final class ForwardPass {
     gear = gearbox.best(solver.rollingCageSpeed(startSpeed));
     shiftLeft = 0;
     before = Double.NaN;
+    axBefore = Double.NaN;
     limits.load(start, level);
+    solver.forget();
     double energy = startSpeed * startSpeed / 2;
     for (int k = 0; k < road.size(); k++) {
       int i = Math.floorMod(start + k, road.size());
@@ -60,6 +69,7 @@ final class ForwardPass {
       if (speed >= limits.speed(i)) {
         speed = limits.speed(i);
         before = Double.NaN;
+        axBefore = Double.NaN;
       }
       energy = capped && limits.isApex(i) ? leaveApex(i) : step(i, speed, capped);
     }
@@ -103,24 +113,68 @@ final class ForwardPass {
     double energy = speed * speed / 2;
     solver.place(road, i);
     gear = gearbox.keepOrLower(gear, solver.rollingCageSpeed(speed));
-    if (!solver.constantSpeed(speed, level, level)) {
+    if (shiftLeft > 0) {
+      return rollThroughShift(i, speed);
+    }
+    TrimLimit why = solver.nextDriveLimit(speed, level, gear, growthMax, limit);
+    if (why == null) {
       limits.load(i, level);
       profile.save(i, level, gear, LapLimit.CORNERING);
       before = Double.NaN;
       return energy;
     }
-    if (shiftLeft > 0 && solver.atCageTorque(level, 0, limit)) {
-      profile.save(i, limit, gear, LapLimit.SHIFT);
-      before = Double.NaN;
-      return roll(energy, limit.ax, road.spacing());
+    if (!capped && axBefore - limit.ax > JUMP) {
+      energy = holdThreshold(i, energy, limit.ax);
+      why = TrimLimit.DRIVER;
     }
-    TrimLimit why = solver.driveLimit(level, gear, growthMax, limit);
     profile.save(i, limit, gear, capped ? LapLimit.CORNERING : reason(why));
+    axBefore = limit.ax;
+    energyBefore = energy;
     double ax = limit.ax;
     double cageSpeed = limit.cageSpeed;
     double slope = Double.isNaN(before) ? startSlope(i, energy, ax) : 1.5 * ax - 0.5 * before;
     before = ax;
     return shiftWithin(i, energy, slope, cageSpeed);
+  }
+
+  /**
+   * The drive limit jumps down between the last station and this one: below some speed the car may
+   * cross a dip of torque, above it may not. Speed is then held at that threshold; without this it
+   * would swing about it by an amount that depends on the spacing.
+   *
+   * @return the energy at the threshold, or the one given when there is no threshold below it
+   */
+  private double holdThreshold(int i, double energy, double axAbove) {
+    double below = energyBefore + Math.min(0, axAbove) * road.spacing();
+    double middle = (axBefore + axAbove) / 2;
+    double above = energy;
+    if (below < LEAST_ENERGY || !(driveLimitAhead(i, Math.sqrt(2 * below)) > middle)) {
+      driveLimitAhead(i, Math.sqrt(2 * energy));
+      return energy;
+    }
+    before = Double.NaN;
+    for (int k = 0; k < THRESHOLD_STEPS; k++) {
+      double energyAt = (below + above) / 2;
+      if (driveLimitAhead(i, Math.sqrt(2 * energyAt)) > middle) {
+        below = energyAt;
+      } else {
+        above = energyAt;
+      }
+    }
+    driveLimitAhead(i, Math.sqrt(2 * below));
+    return below;
+  }
+
+  /** Station within a gear change: no drive torque. */
+  private double rollThroughShift(int i, double speed) {
+    before = Double.NaN;
+    axBefore = Double.NaN;
+    if (!solver.constantSpeed(speed, level, level) || !solver.atCageTorque(level, 0, limit)) {
+      limits.load(i, limit);
+      limit.speed = speed;
+    }
+    profile.save(i, limit, gear, LapLimit.SHIFT);
+    return roll(speed * speed / 2, limit.ax, road.spacing());
   }
 
   private static LapLimit reason(TrimLimit why) {
@@ -142,10 +196,9 @@ final class ForwardPass {
             Math.sqrt(2 * Math.max(energy + ax * road.spacing(), LEAST_ENERGY)),
             limits.speed(next));
     solver.place(road, next);
-    if (!solver.constantSpeed(speed, level, ahead)) {
+    if (solver.nextDriveLimit(speed, level, gear, growthMax, limit) == null) {
       return ax;
     }
-    solver.driveLimit(ahead, gear, growthMax, limit);
     return (ax + limit.ax) / 2;
   }
 
@@ -166,7 +219,8 @@ final class ForwardPass {
     before = Double.NaN;
     double driven = cageSpeed >= shiftSpeed ? 0 : (shiftSpeed - cageSpeed) / (then - cageSpeed);
     solver.place(road, i);
-    double rolling = solver.atCageTorque(level, 0, limit) ? limit.ax : 0;
+    boolean steady = solver.constantSpeed(Math.sqrt(2 * energy), level, level);
+    double rolling = steady && solver.atCageTorque(level, 0, limit) ? limit.ax : 0;
     return roll(energy + slope * ds * driven, rolling, ds * (1 - driven));
   }
 

@@ -93,6 +93,23 @@ final class SlipMarch {
     return choose(capped, out);
   }
 
+  /** Returns the torque slope below which a state may lie before a dip (N·m). */
+  double runawaySlope() {
+    return RUNAWAY_SLOPE * torqueSlope(states[0]);
+  }
+
+  /** Returns whether torque dipped and rose again on the branch that was followed last. */
+  boolean sawDip() {
+    boolean fell = false;
+    for (int i = 1; i < count; i++) {
+      if (fell && torqueSlope(states[i]) > 0) {
+        return true;
+      }
+      fell |= torqueSlope(states[i]) < 0;
+    }
+    return false;
+  }
+
   private double torque(TrimState s) {
     return braking ? s.brakeTorque : s.cageTorque;
   }

@@ -37,6 +37,8 @@ public final class TrimSolver {
   private final CornerLimit corner;
   private final SlipMarch driveMarch;
   private final SlipMarch brakeMarch;
+  private final LimitTracker driveTracker;
+  private final LimitTracker brakeTracker;
   private final FullLoad fullLoad = new FullLoad();
   private final FullBrakes fullBrakes = new FullBrakes();
   private final GivenTorque givenTorque = new GivenTorque();
@@ -59,6 +61,8 @@ public final class TrimSolver {
     this.corner = new CornerLimit(drive, stability, driveStart);
     this.driveMarch = new SlipMarch(drive, stability);
     this.brakeMarch = new SlipMarch(brake, stability);
+    this.driveTracker = new LimitTracker(drive, stability);
+    this.brakeTracker = new LimitTracker(brake, stability);
     this.driveResults = resultsOf(drive);
     this.brakeResults = resultsOf(brake);
   }
@@ -165,34 +169,90 @@ public final class TrimSolver {
     return brakeMarch.find(work, fullBrakes, growthMax, brakeSign, out);
   }
 
+  /**
+   * Finds the largest acceleration at the next point of a road, following the limit of the point
+   * before where that is possible.
+   *
+   * @param speed speed (m/s)
+   * @param level trim at constant speed nearby; replaced when the whole branch had to be searched
+   * @return why the limit lies there, or null when there is no steady trim at this speed
+   */
+  public TrimLimit nextDriveLimit(
+      double speed, TrimState level, int gear, double growthMax, TrimState out) {
+    fullLoad.gear = gear;
+    TrimLimit followed =
+        driveTracker.follow(speed, fullLoad, growthMax, driveStart.referenceSign, out);
+    if (followed != null) {
+      return followed;
+    }
+    if (!constantSpeed(speed, level, level)) {
+      driveTracker.forget();
+      return null;
+    }
+    TrimLimit searched = driveLimit(level, gear, growthMax, out);
+    if (driveMarch.sawDip()) {
+      driveTracker.forget();
+    } else {
+      driveTracker.searched(searched, out, driveMarch.runawaySlope());
+    }
+    return searched;
+  }
+
+  /** Finds the strongest braking at the next point, like {@link #nextDriveLimit}. */
+  public TrimLimit nextBrakeLimit(
+      double speed, TrimState level, int gear, double growthMax, TrimState out) {
+    brake.input = engineSide.overrunTorque(gear, rollingCageSpeed(speed));
+    TrimLimit followed = brakeTracker.follow(speed, fullBrakes, growthMax, brakeSign, out);
+    if (followed != null) {
+      return followed;
+    }
+    if (!constantSpeed(speed, level, level)) {
+      brakeTracker.forget();
+      return null;
+    }
+    TrimLimit searched = brakeLimit(level, gear, growthMax, out);
+    if (out.braking) {
+      brakeTracker.searched(searched, out, brakeMarch.runawaySlope());
+    } else {
+      brakeTracker.forget();
+    }
+    return searched;
+  }
+
+  /** Starts afresh: the next limit has no neighbour. */
+  public void forget() {
+    driveTracker.forget();
+    brakeTracker.forget();
+  }
+
   /** Closes the throttle; returns whether the driver masters the car all the way. */
   private boolean lift(TrimState level, double overrun, double growthMax, TrimState out) {
-    work.copyFrom(level);
-    if (drive.atTotalTorque(work, overrun)
-        && work.determinantSign == driveStart.referenceSign
-        && masters(work, growthMax)) {
+    if (lower(level, overrun, growthMax)) {
       out.copyFrom(work);
       return true;
     }
     out.copyFrom(level);
-    double step = (overrun - level.cageTorque) / LIFT_STEPS;
+    double step = (level.cageTorque - overrun) / LIFT_STEPS;
     for (int i = 0; i < 3 * LIFT_STEPS; i++) {
-      double torque = out.cageTorque + step;
-      if (torque <= overrun) {
-        return false;
-      }
-      work.copyFrom(out);
-      boolean good =
-          drive.atTotalTorque(work, torque)
-              && work.determinantSign == driveStart.referenceSign
-              && masters(work, growthMax);
-      if (good) {
-        out.copyFrom(work);
-      } else {
+      double torque = Math.max(overrun, out.cageTorque - step);
+      if (!lower(out, torque, growthMax)) {
         step /= 4;
+        continue;
+      }
+      out.copyFrom(work);
+      if (torque == overrun) {
+        return true;
       }
     }
     return false;
+  }
+
+  /** Solves in {@code work} for less cage torque; returns whether the driver masters that trim. */
+  private boolean lower(TrimState from, double torque, double growthMax) {
+    work.predict(from, (torque - from.cageTorque) / from.torqueRate);
+    return drive.atTotalTorque(work, torque)
+        && work.determinantSign == driveStart.referenceSign
+        && masters(work, growthMax);
   }
 
   private boolean masters(TrimState state, double growthMax) {
