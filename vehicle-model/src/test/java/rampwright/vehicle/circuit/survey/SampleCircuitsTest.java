@@ -69,9 +69,10 @@ class SampleCircuitsTest {
       Station c = stations.get((i + 1) % n);
       double area2 = (b.x() - a.x()) * (c.y() - a.y()) - (c.x() - a.x()) * (b.y() - a.y());
       double fromPositions = 2 * area2 / (apart(a, b) * apart(b, c) * apart(c, a));
-      // a transition of 12 m bends the curvature by 6/11/12^2 1/m³, of which a twelfth counts
-      double bend = 6 / radius / 144 * 4 / 12;
-      assertThat(fromPositions).isCloseTo(b.curvature(), within(1.3 * bend));
+      // three positions see the curvature of both neighbours with a weight of a sixth each; a
+      // transition of 12 m bends it by 6 / radius / 12² 1/m³
+      double bend = 6 / radius / 144 * 4 / 6;
+      assertThat(fromPositions).isCloseTo(b.curvature(), within(bend));
     }
   }
 
