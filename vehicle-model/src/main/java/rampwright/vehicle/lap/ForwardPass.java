@@ -116,6 +116,9 @@ final class ForwardPass {
     if (shiftLeft > 0) {
       return rollThroughShift(i, speed);
     }
+    if (capped && holds(i)) {
+      return hold(i, energy);
+    }
     TrimLimit why = solver.nextDriveLimit(speed, level, gear, growthMax, limit);
     if (why == null) {
       limits.load(i, level);
@@ -135,6 +138,30 @@ final class ForwardPass {
     double slope = Double.isNaN(before) ? startSlope(i, energy, ax) : 1.5 * ax - 0.5 * before;
     before = ax;
     return shiftWithin(i, energy, slope, cageSpeed);
+  }
+
+  /** Whether the engine has the torque to hold the cornering limit; leaves its trim. */
+  private boolean holds(int i) {
+    limits.load(i, level);
+    return gearbox.fullTorque(gear, cageSpeed(level)) > level.cageTorque;
+  }
+
+  private double cageSpeed(TrimState state) {
+    return solver.rollingCageSpeed(state.speed) * (1 + state.meanSlip);
+  }
+
+  /** Stays at the cornering limit, where there is no acceleration to give. */
+  private double hold(int i, double energy) {
+    profile.save(i, level, gear, LapLimit.CORNERING);
+    before = Double.NaN;
+    axBefore = Double.NaN;
+    int next = i + 1 < road.size() ? i + 1 : 0;
+    if (limits.binds(next) && limits.speed(next) <= level.speed) {
+      return energy;
+    }
+    double cageSpeed = cageSpeed(level);
+    solver.forget();
+    return shiftWithin(i, energy, startSlope(i, energy, 0), cageSpeed);
   }
 
   /**

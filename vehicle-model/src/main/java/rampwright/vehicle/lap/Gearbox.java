@@ -26,6 +26,11 @@ final class Gearbox {
     return driveline.shiftTime();
   }
 
+  /** Returns the cage torque (N·m) at full load in a gear at a cage speed (rad/s). */
+  double fullTorque(int gear, double cageSpeed) {
+    return driveline.fullTorque(gear, cageSpeed);
+  }
+
   /** Returns the cage speed (rad/s) at which a gear is left upwards; infinite in top gear. */
   double upshiftSpeed(int gear) {
     return upshift[gear];

@@ -62,7 +62,9 @@ final class SpeedLimits {
       solver.place(road, i);
       double curvature = Math.abs(road.curvature(i));
       boolean solved =
-          haveNear && solver.cornerLimit(near, firstSpeed(i, curvature), topSpeed, growthMax, out);
+          solver.nextCornerLimit(topSpeed, growthMax, out)
+              || haveNear
+                  && solver.cornerLimit(near, firstSpeed(i, curvature), topSpeed, growthMax, out);
       // where the curvature changes fast, the speed that suits the curvature may be too high
       double from = Math.min(topSpeed, Math.sqrt(GENTLE / Math.max(1e-9, curvature)));
       while (!solved && from > 1) {

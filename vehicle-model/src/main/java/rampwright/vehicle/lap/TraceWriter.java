@@ -81,7 +81,10 @@ final class TraceWriter {
     return ds / 6 * (1 / from + 4 / Math.sqrt(Math.max(least, middle)) + 1 / to);
   }
 
-  /** Solves for the acceleration that the neighbouring speeds ask for. */
+  /**
+   * Solves for the acceleration that the neighbouring speeds ask for, starting from the trim of the
+   * profile.
+   */
   private void follow(int i, int gear) {
     int n = road.size();
     int before = road.closed() ? Math.floorMod(i - 1, n) : Math.max(0, i - 1);
@@ -92,11 +95,11 @@ final class TraceWriter {
                 - profile.speed[before] * profile.speed[before])
             / 2;
     double ax = energyChange / (intervals * road.spacing());
-    state.braking = false;
-    if (!solver.constantSpeed(profile.speed[i], state, level)) {
-      throw new IllegalStateException("no trim at constant speed at station " + i);
-    }
+    level.copyFrom(state);
+    level.speed = profile.speed[i];
+    level.braking = false;
     if (!solver.atAcceleration(level, ax, gear, state) || !solver.restore(state)) {
+      // at the very limit of speed there is no acceleration to give
       state.copyFrom(level);
       if (!solver.restore(state)) {
         throw new IllegalStateException("no trim at station " + i);

@@ -69,13 +69,8 @@ final class Equilibrium {
   /** Cage torque with the brakes on (N·m). */
   double input;
 
-  /** Direction of the branch for {@link Closing#ARC}: sideslip, steer, speed, slips; scaled. */
-  final double[] arcDirection = new double[7];
-
-  final double[] arcOrigin = new double[7];
-
-  /** Unknowns change by these amounts for one unit of arc length. */
-  final double[] arcScale = new double[7];
+  /** Line for {@link Closing#ARC}. */
+  private Arc arc;
 
   Equilibrium(ForceBalance forces, DrivelineEquations driveline, Driveline engineSide) {
     this.forces = forces;
@@ -104,7 +99,9 @@ final class Equilibrium {
     return solve(state, Closing.FULL_LOAD, 0, inGear);
   }
 
-  boolean alongArc(TrimState state, double distance) {
+  /** Solves at a distance along a line; leaves the tangent there in the line. */
+  boolean alongArc(TrimState state, Arc line, double distance) {
+    arc = line;
     return solve(state, Closing.ARC, distance, 0);
   }
 
@@ -178,7 +175,7 @@ final class Equilibrium {
 
     column(0, 1, 0, -fy, fx, 0, 0);
     column(1, 0, 1, 0, 0, 0, 0);
-    if (closing == Closing.ARC) {
+    if (speedIsUnknown()) {
       double dTangential = forces.tangentialBySpeed(v);
       double dNormal = forces.normalBySpeed(v);
       column(
@@ -252,13 +249,7 @@ final class Equilibrium {
         double torque = driveline.totalTorqueOf.apply(forces.value);
         yield (torque - engineSide.fullTorque(gear, cageSpeed)) / torqueScale;
       }
-      case ARC -> {
-        double sum = -target;
-        for (int j = 0; j < size; j++) {
-          sum += arcDirection[j] * (arcUnknown(state, j) - arcOrigin[j]) / arcScale[j];
-        }
-        yield sum;
-      }
+      case ARC -> arc.distance(state) - target;
     };
   }
 
@@ -272,45 +263,23 @@ final class Equilibrium {
         double slope = engineSide.fullTorqueSlope(gear, cageSpeed);
         yield (torqueColumn[j] - slope * cageSpeedColumn[j]) / torqueScale;
       }
-      case ARC -> arcDirection[j] / arcScale[j];
+      case ARC -> arc.direction[j] / arc.scale(j);
     };
   }
 
-  /** Returns an unknown of the branch of constant-speed trims. */
-  double arcUnknown(TrimState state, int j) {
-    return switch (j) {
-      case 0 -> state.sideslip;
-      case 1 -> state.steer;
-      case 2 -> state.speed;
-      default -> state.slip[driveline.activeWheels[j - 3]];
-    };
+  private boolean speedIsUnknown() {
+    return closing == Closing.ARC && arc.inSpeed;
   }
 
-  void arcAdd(TrimState state, int j, double change) {
-    switch (j) {
-      case 0 -> state.sideslip += change;
-      case 1 -> state.steer += change;
-      case 2 -> state.speed += change;
-      default -> state.slip[driveline.activeWheels[j - 3]] += change;
-    }
-  }
-
-  /** Turns an arc's solution into the tangent there, of unit length. */
-  private void turnArc() {
-    double norm = 0;
-    for (int j = 0; j < size; j++) {
-      double component = tangent(j) / arcScale[j];
-      norm += component * component;
-    }
-    norm = Math.sqrt(norm);
-    for (int j = 0; j < size; j++) {
-      arcDirection[j] = tangent(j) / arcScale[j] / norm;
-    }
-  }
-
-  /** Evaluates a solved state once more to learn the determinant's sign at constant mean slip. */
-  boolean signAtMeanSlip(TrimState state) {
-    return atMeanSlip(state, meanSlip(state));
+  /**
+   * Solves a solved state once more at constant mean slip; returns whether its determinant has the
+   * sign given.
+   */
+  boolean signAtMeanSlipIs(int sign, TrimState state) {
+    double sigma = state.sigma;
+    boolean solved = atMeanSlip(state, meanSlip(state));
+    state.sigma = sigma;
+    return solved && state.determinantSign == sign;
   }
 
   private double meanSlip(TrimState state) {
@@ -334,13 +303,13 @@ final class Equilibrium {
     for (int j = 3; j < size; j++) {
       shrink = Math.max(shrink, Math.abs(solution(j)) / LARGEST_SLIP_STEP);
     }
-    if (closing == Closing.ARC) {
+    if (speedIsUnknown()) {
       shrink = Math.max(shrink, Math.abs(solution(2)) / (0.2 * state.speed));
     }
     double factor = shrink > 1 ? 1 / shrink : 1;
     state.sideslip += factor * solution(0);
     state.steer += factor * solution(1);
-    if (closing == Closing.ARC) {
+    if (speedIsUnknown()) {
       state.speed += factor * solution(2);
     } else {
       state.ax += factor * solution(2);
@@ -374,8 +343,13 @@ final class Equilibrium {
     state.cageSpeed = cageSpeed;
     state.sigma = Double.NaN;
     if (closing == Closing.ARC) {
-      turnArc();
-      return;
+      for (int j = 0; j < size; j++) {
+        rightSide[j] = tangent(j);
+      }
+      arc.storeTangent(rightSide);
+      if (arc.inSpeed) {
+        return;
+      }
     }
     state.determinantSign = system.determinantSign * (int) Math.signum(meanSlipRate);
     state.sideslipRate = tangent(0) / meanSlipRate;

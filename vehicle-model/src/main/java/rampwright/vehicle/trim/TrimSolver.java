@@ -221,6 +221,7 @@ public final class TrimSolver {
 
   /** Starts afresh: the next limit has no neighbour. */
   public void forget() {
+    corner.forget();
     driveTracker.forget();
     brakeTracker.forget();
   }
@@ -282,6 +283,15 @@ public final class TrimSolver {
   }
 
   /**
+   * Follows the cornering limit from the point where it was found last.
+   *
+   * @return false when it must be searched with {@link #cornerLimit}
+   */
+  public boolean nextCornerLimit(double topSpeed, double growthMax, TrimState out) {
+    return corner.follow(topSpeed, growthMax, out);
+  }
+
+  /**
    * Follows the branch from constant speed to a cage torque with the brakes off.
    *
    * @return false when the branch does not reach it
@@ -308,21 +318,35 @@ public final class TrimSolver {
    * Solves for a path acceleration, with throttle or, when closing it is not enough, with the
    * brakes.
    *
-   * @param level trim at constant speed
+   * @param near trim with the brakes off at the same speed
    * @return whether there is such a trim
    */
-  public boolean atAcceleration(TrimState level, double ax, int gear, TrimState out) {
-    out.copyFrom(level);
-    double overrun = engineSide.overrunTorque(gear, rollingCageSpeed(level.speed));
-    if (drive.atAcceleration(out, ax) && out.cageTorque >= overrun) {
-      return out.determinantSign == driveStart.referenceSign;
+  public boolean atAcceleration(TrimState near, double ax, int gear, TrimState out) {
+    double overrun = engineSide.overrunTorque(gear, rollingCageSpeed(near.speed));
+    out.copyFrom(near);
+    if (throttleGives(ax, overrun, out)) {
+      return true;
+    }
+    // near the limit of speed only the far side of the branch leads there
+    if (!driveStart.coasting(near.speed, work)) {
+      return false;
+    }
+    out.copyFrom(work);
+    if (throttleGives(ax, overrun, out)) {
+      return true;
     }
     brake.input = overrun;
-    out.copyFrom(level);
+    out.copyFrom(work);
     Arrays.fill(out.slip, 0);
     return brake.atTotalTorque(out, overrun)
         && brake.atAcceleration(out, ax)
         && out.brakeTorque >= 0;
+  }
+
+  private boolean throttleGives(double ax, double overrun, TrimState out) {
+    return drive.atAcceleration(out, ax)
+        && out.cageTorque >= overrun
+        && out.determinantSign == driveStart.referenceSign;
   }
 
   /**
