@@ -15,6 +15,9 @@ public final class SampleFiles {
   /** Folder of the bad inputs below it. */
   public static final String FAILURES = "failure/";
 
+  /** The event that stands for the whole job, with which the page starts. */
+  public static final String MAIN_EVENT = "events/double_header.yaml";
+
   private static final String INDEX = "index.csv";
 
   private SampleFiles() {}

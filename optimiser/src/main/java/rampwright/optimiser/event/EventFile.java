@@ -105,6 +105,15 @@ public final class EventFile {
    *
    * @throws InvalidInput when one of them breaks a rule
    */
+  public static Event read(FileSource source, String path) {
+    return read(source, path, CircuitFile::read);
+  }
+
+  /**
+   * Reads an event and every file that it names, its circuits in a way of the caller's.
+   *
+   * @throws InvalidInput when one of them breaks a rule
+   */
   public static Event read(FileSource source, String path, CircuitReader circuits) {
     return new EventFile(source, path, circuits).event(YamlReader.read(source, path));
   }

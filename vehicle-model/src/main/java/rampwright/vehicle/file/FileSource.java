@@ -87,11 +87,7 @@ public interface FileSource {
     try (InputStream stream = open(path)) {
       bytes = stream.readNBytes(limit + 1);
     } catch (IOException e) {
-      throw InvalidInput.of(
-          "file",
-          describe(path),
-          "a file that can be read",
-          "the path is wrong: it counts from the folder of the file that names it");
+      throw unreadable(describe(path));
     }
     if (bytes.length > limit) {
       throw InvalidInput.of(
@@ -108,6 +104,15 @@ public interface FileSource {
               "file", "not UTF-8", "plain text in UTF-8", "save it again with that encoding")
           .at(describe(path));
     }
+  }
+
+  /** Returns the error for a file that is missing or cannot be read. */
+  static InvalidInput unreadable(String described) {
+    return InvalidInput.of(
+        "file",
+        described,
+        "a file that can be read",
+        "the path is wrong: it counts from the folder of the file that names it");
   }
 
   /** Returns the path of a file that another file names relative to its own folder. */
