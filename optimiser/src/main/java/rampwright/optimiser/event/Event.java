@@ -3,6 +3,7 @@ package rampwright.optimiser.event;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import rampwright.optimiser.kit.KitSetting;
 import rampwright.optimiser.kit.PartsKit;
 import rampwright.vehicle.Car;
 import rampwright.vehicle.Conditions;
@@ -85,6 +86,17 @@ public record Event(
   /** Returns the setting that is in the car now. */
   public NamedSetting current() {
     return setting(currentSetting);
+  }
+
+  /**
+   * Returns a setting that the kit builds, in its place in this car; other positions stay as they
+   * are in the current setting.
+   *
+   * @throws InvalidInput when the kit cannot build it
+   */
+  public NamedSetting built(String settingName, KitSetting setting) {
+    return NamedSetting.of(
+        settingName, kit, setting, car.driveline().layout(), current().differentials());
   }
 
   /** Returns the lap request of a setting on one of the circuits. */

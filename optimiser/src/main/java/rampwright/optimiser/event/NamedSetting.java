@@ -3,7 +3,10 @@ package rampwright.optimiser.event;
 import java.util.Optional;
 import rampwright.optimiser.kit.KitSetting;
 import rampwright.optimiser.kit.PartsKit;
+import rampwright.vehicle.differential.Differential;
 import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.differential.OpenDifferential;
+import rampwright.vehicle.driveline.DriveLayout;
 import rampwright.vehicle.input.InvalidInput;
 
 /**
@@ -17,12 +20,29 @@ import rampwright.vehicle.input.InvalidInput;
 public record NamedSetting(
     String name, Optional<KitSetting> kitSetting, DifferentialSet differentials) {
   /**
-   * Returns a setting built from the kit, in the rear axle.
+   * Returns a setting built from the kit, in the rear axle of a rear-wheel-drive car.
    *
    * @throws InvalidInput when the kit cannot build it
    */
   public static NamedSetting of(String name, PartsKit kit, KitSetting setting) {
-    return new NamedSetting(
-        name, Optional.of(setting), DifferentialSet.rear(kit.build(setting).law()));
+    DifferentialSet none = DifferentialSet.rear(OpenDifferential.IDEAL);
+    return of(name, kit, setting, DriveLayout.REAR, none);
+  }
+
+  /**
+   * Returns a setting built from the kit, in the front axle of a front-wheel-drive car and in the
+   * rear axle of any other.
+   *
+   * @param others what is in the other positions
+   * @throws InvalidInput when the kit cannot build it
+   */
+  public static NamedSetting of(
+      String name, PartsKit kit, KitSetting setting, DriveLayout layout, DifferentialSet others) {
+    Differential law = kit.build(setting).law();
+    DifferentialSet all =
+        layout == DriveLayout.FRONT
+            ? new DifferentialSet(law, others.centre(), others.rear())
+            : new DifferentialSet(others.front(), others.centre(), law);
+    return new NamedSetting(name, Optional.of(setting), all);
   }
 }

@@ -6,6 +6,8 @@ import java.util.Map;
 import java.util.Optional;
 import rampwright.optimiser.kit.KitSetting;
 import rampwright.optimiser.kit.PartsKit;
+import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.differential.OpenDifferential;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.PlateDifferential;
 import rampwright.vehicle.driveline.DriveLayout;
@@ -16,14 +18,20 @@ import rampwright.vehicle.file.YamlNode;
 
 /**
  * One setting as YAML: its {@code name} and either {@code kit}, what the crew fits, or {@code
- * differentials}, laws to compare with.
+ * differentials}, laws to compare with. A car with all wheels driven has the kit's unit in its rear
+ * axle and may name the other two with {@code differentials} beside {@code kit}.
  */
 final class SettingFile {
   private static final String NAME = "name";
   private static final String KIT = "kit";
   private static final String DIFFERENTIALS = "differentials";
+  private static final String FRONT = "front";
+  private static final String CENTRE = "centre";
+  private static final String REAR = "rear";
   private static final String RING_SET = "ring_set";
   private static final String TURNED = "turned";
+
+  private static final DifferentialSet NONE = DifferentialSet.rear(OpenDifferential.IDEAL);
 
   private static final Fields<KitSetting> KIT_FIELDS =
       Fields.<KitSetting>none().with(PlateDifferential.PRELOAD, KitSetting::preload);
@@ -35,34 +43,43 @@ final class SettingFile {
     String name = map.get(NAME).text();
     Optional<YamlNode> fitted = map.find(KIT);
     Optional<YamlNode> laws = map.find(DIFFERENTIALS);
-    if (fitted.isPresent() == laws.isPresent()) {
+    boolean beside = layout == DriveLayout.ALL && fitted.isPresent();
+    if (fitted.isPresent() == laws.isPresent() && !beside) {
       throw node.fault(
           "setting",
           fitted.isPresent() ? "kit and differentials" : "neither kit nor differentials",
           "either a kit setting or a set of differentials",
           "");
     }
+    DifferentialSet others = laws.map(value -> laws(value, layout, beside)).orElse(NONE);
     return fitted
-        .map(value -> fitted(name, value, kit))
-        .orElseGet(
-            () ->
-                new NamedSetting(
-                    name, Optional.empty(), DifferentialFile.readSet(laws.get(), layout)));
+        .map(value -> fitted(name, value, kit, layout, others))
+        .orElseGet(() -> new NamedSetting(name, Optional.empty(), others));
+  }
+
+  private static DifferentialSet laws(YamlNode node, DriveLayout layout, boolean beside) {
+    if (beside && node.map(List.of(FRONT, CENTRE, REAR)).find(REAR).isPresent()) {
+      throw node.fault("rear differential", "given twice", "the kit's", "leave out one of the two");
+    }
+    return DifferentialFile.readSet(node, layout);
   }
 
   static Map<String, Object> write(NamedSetting setting, DriveLayout layout) {
     Map<String, Object> out = new LinkedHashMap<>();
     out.put(NAME, setting.name());
-    setting
-        .kitSetting()
-        .ifPresentOrElse(
-            fitted -> out.put(KIT, write(fitted)),
-            () ->
-                out.put(DIFFERENTIALS, DifferentialFile.writeSet(setting.differentials(), layout)));
+    setting.kitSetting().ifPresent(fitted -> out.put(KIT, write(fitted)));
+    Map<String, Object> laws = DifferentialFile.writeSet(setting.differentials(), layout);
+    if (setting.kitSetting().isPresent()) {
+      laws.remove(layout == DriveLayout.FRONT ? FRONT : REAR);
+    }
+    if (!laws.isEmpty()) {
+      out.put(DIFFERENTIALS, laws);
+    }
     return out;
   }
 
-  private static NamedSetting fitted(String name, YamlNode node, PartsKit kit) {
+  private static NamedSetting fitted(
+      String name, YamlNode node, PartsKit kit, DriveLayout layout, DifferentialSet others) {
     String faces = PlateBuild.FACES_PER_SIDE.key();
     YamlMap map = node.map(KIT_FIELDS.keysAnd(RING_SET, TURNED, faces));
     KitSetting setting =
@@ -71,7 +88,7 @@ final class SettingFile {
             map.find(TURNED).map(YamlNode::flag).orElse(false),
             map.get(faces).wholeNumber(PlateBuild.FACES_PER_SIDE),
             KIT_FIELDS.read(map).of(PlateDifferential.PRELOAD));
-    return map.place(() -> NamedSetting.of(name, kit, setting));
+    return map.place(() -> NamedSetting.of(name, kit, setting, layout, others));
   }
 
   private static Map<String, Object> write(KitSetting setting) {

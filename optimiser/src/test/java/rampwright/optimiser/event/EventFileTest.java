@@ -14,10 +14,12 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import rampwright.optimiser.kit.KitSetting;
 import rampwright.vehicle.Conditions;
 import rampwright.vehicle.Driver;
 import rampwright.vehicle.circuit.Circuit;
 import rampwright.vehicle.circuit.Station;
+import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.differential.OpenDifferential;
 import rampwright.vehicle.differential.PlateDifferential;
 import rampwright.vehicle.differential.Spool;
@@ -55,6 +57,10 @@ class EventFileTest {
       current_setting: as raced  # line 22
       """;
 
+  private static final EventFile.Names NAMES =
+      new EventFile.Names(
+          "../cars/touring_car.yaml", "../kits/plate_kit.yaml", List.of("ring.csv", "oval.csv"));
+
   /** The two circuits by name; any other file is unknown. */
   private static Circuit circle(FileSource source, String path) {
     if (!path.equals("events/ring.csv") && !path.equals("events/oval.csv")) {
@@ -70,17 +76,27 @@ class EventFileTest {
   }
 
   private static FileSource with(String event) {
+    return with(event, "rear");
+  }
+
+  private static FileSource with(String event, String layout) {
     Map<String, String> texts = new HashMap<>();
     for (String path :
         List.of("cars/touring_car.yaml", "tyres/dry_slick.yaml", "kits/plate_kit.yaml")) {
       texts.put(path, SAMPLES.text(path, YamlReader.LARGEST));
     }
+    texts.computeIfPresent(
+        "cars/touring_car.yaml", (path, car) -> car.replace("layout: rear", "layout: " + layout));
     texts.put("events/e.yaml", event);
     return FileSource.texts(texts);
   }
 
   private static Event read(String text) {
-    return EventFile.read(with(text), "events/e.yaml", EventFileTest::circle);
+    return read(text, "rear");
+  }
+
+  private static Event read(String text, String layout) {
+    return EventFile.read(with(text, layout), "events/e.yaml", EventFileTest::circle);
   }
 
   @Test
@@ -122,11 +138,55 @@ class EventFileTest {
 
   @Test
   void anEventThatIsWrittenIsReadBackUnchanged() {
-    EventFile.Names names =
-        new EventFile.Names(
-            "../cars/touring_car.yaml", "../kits/plate_kit.yaml", List.of("ring.csv", "oval.csv"));
     Event event = read(EVENT);
-    assertThat(read(EventFile.write(event, names))).isEqualTo(event);
+    assertThat(read(EventFile.write(event, NAMES))).isEqualTo(event);
+  }
+
+  @Test
+  void theKitSitsInTheFrontAxleOfAFrontWheelDriveCar() {
+    Event event =
+        read(EVENT.replace("{rear: ", "{front: ").replace(" rear: {", " front: {"), "front");
+    KitSetting fitted = event.current().kitSetting().orElseThrow();
+    assertThat(event.current().differentials().front()).isEqualTo(event.kit().build(fitted).law());
+    assertThat(event.current().differentials().rear()).isEqualTo(OpenDifferential.IDEAL);
+    assertThat(event.built("as raced", fitted)).isEqualTo(event.current());
+    assertThat(read(EventFile.write(event, NAMES), "front")).isEqualTo(event);
+  }
+
+  @Test
+  void theOtherPositionsOfAFourWheelDriveCarStandBesideTheKit() {
+    String both =
+        EVENT.replace(
+            "preload_nm: 60}",
+            "preload_nm: 60}\n    differentials: {centre: {kind: plate, preload_nm: 90,"
+                + " drive_share: 0, coast_share: 0}}");
+    Event event = read(both, "all");
+    KitSetting fitted = event.current().kitSetting().orElseThrow();
+    DifferentialSet set = event.current().differentials();
+    assertThat(set.rear()).isEqualTo(event.kit().build(fitted).law());
+    assertThat(set.centre()).isEqualTo(new PlateDifferential(90, 0, 0));
+    assertThat(set.front()).isEqualTo(OpenDifferential.IDEAL);
+    KitSetting other = new KitSetting("45/45", false, 4, 20);
+    assertThat(event.built("x", other).differentials().centre()).isEqualTo(set.centre());
+    assertThat(event.built("x", other).differentials().rear())
+        .isEqualTo(event.kit().build(other).law());
+    assertThat(read(EventFile.write(event, NAMES), "all")).isEqualTo(event);
+  }
+
+  @Test
+  void theKitsPositionIsNotGivenASecondTime() {
+    String twice =
+        EVENT.replace("preload_nm: 60}", "preload_nm: 60}\n    differentials: {rear: open}");
+    assertThatExceptionOfType(InvalidInput.class)
+        .isThrownBy(() -> read(twice, "all"))
+        .withMessage(
+            "events/e.yaml:16: settings[1].differentials: The rear differential (given twice) must"
+                + " be the kit's. Maybe leave out one of the two.");
+    assertThatExceptionOfType(InvalidInput.class)
+        .isThrownBy(() -> read(twice, "rear"))
+        .withMessage(
+            "events/e.yaml:14: settings[1]: The setting (kit and differentials) must be either a"
+                + " kit setting or a set of differentials.");
   }
 
   @Test
