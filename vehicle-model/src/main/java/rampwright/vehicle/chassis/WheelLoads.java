@@ -25,8 +25,11 @@ public final class WheelLoads {
   /** Standard acceleration of gravity (m/s²). */
   public static final double GRAVITY = 9.80665;
 
-  /** Share of the car's weight over which lifting is rounded. */
-  private static final double ROUNDING = 0.005;
+  /** Share of half an axle's load over which the lifting of a wheel is rounded. */
+  private static final double ROLL_ROUNDING = 0.02;
+
+  /** Share of half the car's load over which the lifting of an axle is rounded. */
+  private static final double PITCH_ROUNDING = 0.01;
 
   private final double mass;
   private final double frontShare;
@@ -34,13 +37,20 @@ public final class WheelLoads {
   private final double frontTransfer;
   private final double rearTransfer;
   private final double trackRatio;
-  private final double rounding;
 
   private final double[] load = new double[4];
   private final double[] byFx = new double[4];
   private final double[] byFy = new double[4];
   private final double[] bySpeed = new double[4];
-  private double posSlope;
+
+  // value, partials with fx, fy and speed
+  private final double[] front = new double[4];
+  private final double[] rear = new double[4];
+  private final double[] tf = new double[4];
+  private final double[] tr = new double[4];
+  private final double[] rest = new double[4];
+  private final double[] demand = new double[4];
+  private final double[] limit = new double[4];
 
   /** Prepares the formulas for a chassis. */
   public WheelLoads(Chassis chassis) {
@@ -61,7 +71,6 @@ public final class WheelLoads {
             / chassis.trackRear()
             * (a / wheelbase * chassis.rollCentreRear() + (1 - chassis.frontRollShare()) * arm);
     this.trackRatio = chassis.trackFront() / chassis.trackRear();
-    this.rounding = ROUNDING * mass * GRAVITY;
   }
 
   /**
@@ -85,19 +94,24 @@ public final class WheelLoads {
       double downFrontSpeed,
       double downRear,
       double downRearSpeed) {
-    double front = mass * fz * frontShare - pitch * fx + downFront;
-    double rear = mass * fz * (1 - frontShare) + pitch * fx + downRear;
+    double frontLoad = mass * fz * frontShare - pitch * fx + downFront;
+    double rearLoad = mass * fz * (1 - frontShare) + pitch * fx + downRear;
     double frontBySpeed = mass * fzSpeed * frontShare + downFrontSpeed;
     double rearBySpeed = mass * fzSpeed * (1 - frontShare) + downRearSpeed;
-    double tf = frontTransfer * fy;
-    double tr = rearTransfer * fy;
-    boolean grounded = front / 2 - Math.abs(tf) > rounding && rear / 2 - Math.abs(tr) > rounding;
-    if (grounded) {
-      axle(0, front, -pitch, frontBySpeed, tf, 0, frontTransfer, 0);
-      axle(2, rear, pitch, rearBySpeed, tr, 0, rearTransfer, 0);
+    double frontMoment = frontTransfer * fy;
+    double rearMoment = rearTransfer * fy;
+    double least = PITCH_ROUNDING * (frontLoad + rearLoad) / 2;
+    boolean level = frontLoad > least && rearLoad > least;
+    if (level && !lifts(frontLoad, frontMoment) && !lifts(rearLoad, rearMoment)) {
+      axle(0, frontLoad, -pitch, frontBySpeed, frontMoment, 0, frontTransfer, 0);
+      axle(2, rearLoad, pitch, rearBySpeed, rearMoment, 0, rearTransfer, 0);
     } else {
-      lifted(front, rear, frontBySpeed, rearBySpeed, tf, tr);
+      lifted(frontLoad, rearLoad, frontBySpeed, rearBySpeed, frontMoment, rearMoment);
     }
+  }
+
+  private static boolean lifts(double axleLoad, double transfer) {
+    return Math.abs(transfer) >= (1 - ROLL_ROUNDING) * axleLoad / 2;
   }
 
   private void axle(
@@ -119,99 +133,85 @@ public final class WheelLoads {
     bySpeed[left + 1] = totalBySpeed / 2 + transferBySpeed;
   }
 
-  /**
-   * Loads when an axle or a wheel is near or beyond lifting; derivatives follow by the chain rule.
-   */
+  /** Loads when an axle or a wheel is near or beyond lifting. */
   private void lifted(
-      double front0,
-      double rear0,
-      double frontBySpeed0,
-      double rearBySpeed0,
-      double tf0,
-      double tr0) {
-    double total = Math.max(front0 + rear0, 0);
-    double totalBySpeed = front0 + rear0 > 0 ? frontBySpeed0 + rearBySpeed0 : 0;
+      double frontLoad,
+      double rearLoad,
+      double frontBySpeed,
+      double rearBySpeed,
+      double frontMoment,
+      double rearMoment) {
+    boolean onGround = frontLoad + rearLoad > 0;
+    double half = onGround ? (frontLoad + rearLoad) / 2 : 0;
+    double halfBySpeed = onGround ? (frontBySpeed + rearBySpeed) / 2 : 0;
     // an axle that would be pulled off the ground leaves its load to the other
-    double front = total - positive(total - positive(front0));
-    double slopeOuter = posSlope;
-    positive(front0);
-    double slope = slopeOuter * posSlope;
-    double frontByFx = -pitch * slope;
-    double frontBySpeed = totalBySpeed * (1 - slopeOuter) + frontBySpeed0 * slope;
-    double rear = total - front;
-    double rearByFx = -frontByFx;
-    double rearBySpeed = totalBySpeed - frontBySpeed;
-
-    double sign = tf0 + tr0 >= 0 ? 1 : -1;
-    double tf = sign * tf0;
-    double tfByFx = 0;
-    double tfByFy = sign * frontTransfer;
-    double tfBySpeed = 0;
-    double tr = sign * tr0;
-    double trByFx = 0;
-    double trByFy = sign * rearTransfer;
-    double trBySpeed = 0;
-
-    double excess = positive(tf - front / 2);
-    double s = posSlope;
-    double excessByFx = s * (tfByFx - frontByFx / 2);
-    double excessByFy = s * tfByFy;
-    double excessBySpeed = s * (tfBySpeed - frontBySpeed / 2);
-    tf -= excess;
-    tfByFx -= excessByFx;
-    tfByFy -= excessByFy;
-    tfBySpeed -= excessBySpeed;
-    tr += excess * trackRatio;
-    trByFx += excessByFx * trackRatio;
-    trByFy += excessByFy * trackRatio;
-    trBySpeed += excessBySpeed * trackRatio;
-
-    excess = positive(tr - rear / 2);
-    s = posSlope;
-    excessByFx = s * (trByFx - rearByFx / 2);
-    excessByFy = s * trByFy;
-    excessBySpeed = s * (trBySpeed - rearBySpeed / 2);
-    tr -= excess;
-    trByFx -= excessByFx;
-    trByFy -= excessByFy;
-    trBySpeed -= excessBySpeed;
-    tf += excess / trackRatio;
-    tfByFx += excessByFx / trackRatio;
-    tfByFy += excessByFy / trackRatio;
-    tfBySpeed += excessBySpeed / trackRatio;
-
-    // both inner wheels in the air: the car is on two wheels and can carry no more moment
-    excess = positive(tf - front / 2);
-    s = posSlope;
-    tf -= excess;
-    tfByFx -= s * (tfByFx - frontByFx / 2);
-    tfByFy -= s * tfByFy;
-    tfBySpeed -= s * (tfBySpeed - frontBySpeed / 2);
-
-    axle(
-        0,
-        front,
-        frontByFx,
-        frontBySpeed,
-        sign * tf,
-        sign * tfByFx,
-        sign * tfByFy,
-        sign * tfBySpeed);
-    axle(2, rear, rearByFx, rearBySpeed, sign * tr, sign * trByFx, sign * trByFy, sign * trBySpeed);
+    set(limit, half, 0, 0, halfBySpeed);
+    set(demand, frontLoad - half, -pitch, 0, frontBySpeed - halfBySpeed);
+    within(demand, limit, PITCH_ROUNDING, front);
+    for (int k = 0; k < 4; k++) {
+      double share = front[k];
+      front[k] = (limit[k] + share) / 2;
+      rear[k] = (limit[k] - share) / 2;
+    }
+    // from here on front and rear are the most that an axle can shift from side to side
+    set(demand, frontMoment, 0, frontTransfer, 0);
+    within(demand, front, ROLL_ROUNDING, tf);
+    for (int k = 0; k < 4; k++) {
+      demand[k] = (demand[k] - tf[k]) * trackRatio;
+    }
+    demand[0] += rearMoment;
+    demand[2] += rearTransfer;
+    within(demand, rear, ROLL_ROUNDING, tr);
+    // with both inner wheels in the air the car can carry no more moment
+    double side = demand[0] >= tr[0] ? 1 : -1;
+    for (int k = 0; k < 4; k++) {
+      demand[k] = (demand[k] - tr[k]) / trackRatio;
+      limit[k] = front[k] - side * tf[k];
+    }
+    within(demand, limit, ROLL_ROUNDING, rest);
+    for (int k = 0; k < 4; k++) {
+      tf[k] += rest[k];
+    }
+    axle(0, 2 * front[0], 2 * front[1], 2 * front[3], tf[0], tf[1], tf[2], tf[3]);
+    axle(2, 2 * rear[0], 2 * rear[1], 2 * rear[3], tr[0], tr[1], tr[2], tr[3]);
   }
 
-  /** Positive part of x, rounded between minus and plus the rounding load; leaves its slope. */
-  private double positive(double x) {
-    if (x >= rounding) {
-      posSlope = 1;
-      return x;
+  private static void set(double[] out, double value, double byFx, double byFy, double bySpeed) {
+    out[0] = value;
+    out[1] = byFx;
+    out[2] = byFy;
+    out[3] = bySpeed;
+  }
+
+  /**
+   * Keeps a demand between minus and plus a limit, rounded where it meets the limit over a share of
+   * the limit: so the result never exceeds it, however small it is. Each array holds a value and
+   * its three partials.
+   */
+  private static void within(double[] demand, double[] limit, double rounding, double[] out) {
+    double size = Math.abs(demand[0]);
+    double sign = demand[0] >= 0 ? 1 : -1;
+    double most = Math.max(limit[0], 0);
+    double width = rounding * most;
+    double byDemand;
+    double byLimit;
+    if (size < most - width) {
+      out[0] = demand[0];
+      byDemand = 1;
+      byLimit = 0;
+    } else if (size >= most + width) {
+      out[0] = sign * most;
+      byDemand = 0;
+      byLimit = sign;
+    } else {
+      double q = (size - most + width) / (2 * width);
+      out[0] = sign * (size - width * q * q);
+      byDemand = 1 - q;
+      byLimit = sign * (q - rounding * (q - q * q));
     }
-    if (x <= -rounding) {
-      posSlope = 0;
-      return 0;
+    for (int k = 1; k < 4; k++) {
+      out[k] = byDemand * demand[k] + byLimit * limit[k];
     }
-    posSlope = (x + rounding) / (2 * rounding);
-    return (x + rounding) * posSlope / 2;
   }
 
   /** Returns the load of a wheel (N). */
