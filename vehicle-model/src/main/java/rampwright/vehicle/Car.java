@@ -7,6 +7,7 @@ import rampwright.vehicle.driveline.Driveline;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.input.Quantity;
 import rampwright.vehicle.tyre.Tyre;
+import rampwright.vehicle.tyre.TyreForces;
 
 /**
  * Everything about a car that stays the same while its differential is being set.
@@ -48,12 +49,32 @@ public record Car(
           2,
           "the value is in millimetres");
 
-  /** Checks the radii and the name. */
+  /** Load (N) at which the tyres' force without slip is checked. */
+  private static final double LOAD_OF_CHECK = 3000;
+
+  /** Checks the radii, the name and that a tyre without slip has no force. */
   public Car {
     if (name == null || name.isBlank()) {
       throw InvalidInput.of("name of the car", "blank", "some text", "");
     }
     FRONT_RADIUS.check(frontRadius);
     REAR_RADIUS.check(rearRadius);
+    checkAtRest("front", frontTyre);
+    checkAtRest("rear", rearTyre);
+  }
+
+  /** A free wheel rolls without slip, so a force there would never be in balance. */
+  private static void checkAtRest(String position, Tyre tyre) {
+    TyreForces forces = new TyreForces();
+    tyre.evaluate(LOAD_OF_CHECK, 0, 0, 1, forces);
+    double force = Math.hypot(forces.fx, forces.fy);
+    if (!(force <= 1e-9 * LOAD_OF_CHECK)) {
+      throw InvalidInput.value(
+          "force of the " + position + " tyre without slip",
+          force,
+          "N",
+          "zero",
+          "the shifts of the curves are still in: use the centred tyre");
+    }
   }
 }

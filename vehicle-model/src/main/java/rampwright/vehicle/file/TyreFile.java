@@ -4,15 +4,18 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.tyre.MagicFormulaTyre;
 import rampwright.vehicle.tyre.PeakAtLoad;
 import rampwright.vehicle.tyre.PeakSlipTyre;
 import rampwright.vehicle.tyre.SlipCurve;
 import rampwright.vehicle.tyre.Tyre;
 
-/** Tyres as YAML. {@code model} says which kind; {@code peak_slip} is the one there is. */
+/** Tyres as YAML. {@code model} says which kind: {@code peak_slip} or {@code magic_formula}. */
 public final class TyreFile {
   private static final String MODEL = "model";
+  private static final String NAME = "name";
   private static final String PEAK_SLIP = "peak_slip";
+  private static final String MAGIC_FORMULA = "magic_formula";
 
   private static final Fields<PeakAtLoad> PEAK =
       Fields.<PeakAtLoad>none()
@@ -34,9 +37,20 @@ public final class TyreFile {
   }
 
   static Tyre read(YamlNode node) {
-    YamlMap map = node.map(List.of("name", MODEL, "light", "heavy", "longitudinal", "lateral"));
-    map.find("name").ifPresent(YamlNode::text);
-    map.get(MODEL).choice(Map.of(PEAK_SLIP, PEAK_SLIP));
+    String model =
+        node.peek(MODEL).choice(Map.of(PEAK_SLIP, PEAK_SLIP, MAGIC_FORMULA, MAGIC_FORMULA));
+    return model.equals(PEAK_SLIP) ? peakSlip(node) : magicFormula(node);
+  }
+
+  private static MagicFormulaTyre magicFormula(YamlNode node) {
+    YamlMap map = node.map(MagicFormulaFile.keysAnd(NAME, MODEL));
+    map.find(NAME).ifPresent(YamlNode::text);
+    return MagicFormulaFile.read(map);
+  }
+
+  private static PeakSlipTyre peakSlip(YamlNode node) {
+    YamlMap map = node.map(List.of(NAME, MODEL, "light", "heavy", "longitudinal", "lateral"));
+    map.find(NAME).ifPresent(YamlNode::text);
     PeakAtLoad light = peak(map.get("light"));
     PeakAtLoad heavy = peak(map.get("heavy"));
     SlipCurve longitudinal = curve(map.get("longitudinal"));
@@ -50,10 +64,15 @@ public final class TyreFile {
    * @throws IllegalArgumentException for a kind of tyre that has no file form
    */
   static Map<String, Object> write(Tyre tyre) {
+    Map<String, Object> out = new LinkedHashMap<>();
+    if (tyre instanceof MagicFormulaTyre magic) {
+      out.put(MODEL, MAGIC_FORMULA);
+      out.putAll(MagicFormulaFile.write(magic));
+      return out;
+    }
     if (!(tyre instanceof PeakSlipTyre peakSlip)) {
       throw new IllegalArgumentException("no file form for " + tyre.getClass());
     }
-    Map<String, Object> out = new LinkedHashMap<>();
     out.put(MODEL, PEAK_SLIP);
     out.put("light", PEAK.write(peakSlip.light()));
     out.put("heavy", PEAK.write(peakSlip.heavy()));
