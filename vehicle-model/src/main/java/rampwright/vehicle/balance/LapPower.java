@@ -1,0 +1,96 @@
+package rampwright.vehicle.balance;
+
+import java.util.function.IntToDoubleFunction;
+import rampwright.vehicle.Car;
+import rampwright.vehicle.lap.Channel;
+import rampwright.vehicle.lap.Lap;
+import rampwright.vehicle.lap.Trace;
+
+/** Power (W) that is turned into heat, station by station, and its energy (J) over intervals. */
+final class LapPower {
+  /** Outputs that differ by less than this (rad/s) turn together within the solver's tolerance. */
+  private static final double SAME_SPEED = 1e-4;
+
+  private final Lap lap;
+  private final Trace trace;
+  private final boolean closed;
+  private final int n;
+
+  LapPower(Lap lap) {
+    this.lap = lap;
+    this.trace = lap.trace();
+    this.closed = lap.road().closed();
+    this.n = lap.road().size();
+  }
+
+  /** Time (s) from a station to the next; 0 at the end of an open road. */
+  double interval(int i) {
+    if (i < n - 1) {
+      return trace.get(Channel.TIME, i + 1) - trace.get(Channel.TIME, i);
+    }
+    return closed ? lap.time() - trace.get(Channel.TIME, i) : 0;
+  }
+
+  /** Energy (J) of a power from a station to the next by the trapezoidal rule. */
+  double energy(int i, IntToDoubleFunction power) {
+    int next = i < n - 1 ? i + 1 : closed ? 0 : i;
+    return interval(i) * (power.applyAsDouble(i) + power.applyAsDouble(next)) / 2;
+  }
+
+  /** Energy (J) of a power over the whole lap. */
+  double lapEnergy(IntToDoubleFunction power) {
+    double sum = 0;
+    for (int i = 0; i < n; i++) {
+      sum += energy(i, power);
+    }
+    return sum;
+  }
+
+  /** Sliding power of all differentials: {@code D |dOmega| / 2} each. */
+  double plates(int i) {
+    return unit(i, Channel.FRONT_TORQUE_DIFFERENCE, Channel.FRONT_SPEED_DIFFERENCE)
+        + unit(i, Channel.CENTRE_TORQUE_DIFFERENCE, Channel.CENTRE_SPEED_DIFFERENCE)
+        + unit(i, Channel.REAR_TORQUE_DIFFERENCE, Channel.REAR_SPEED_DIFFERENCE);
+  }
+
+  private double unit(int i, Channel torqueDifference, Channel speedDifference) {
+    return trace.get(torqueDifference, i) * Math.abs(trace.get(speedDifference, i)) / 2;
+  }
+
+  /** Sliding power of both front tyres. */
+  double frontTyres(int i) {
+    double radius = car().frontRadius();
+    return tyre(i, 0, radius) + tyre(i, 1, radius);
+  }
+
+  /** Sliding power of both rear tyres. */
+  double rearTyres(int i) {
+    double radius = car().rearRadius();
+    return tyre(i, 2, radius) + tyre(i, 3, radius);
+  }
+
+  /** Returns whether the outputs of a unit with friction turn together. */
+  boolean sticking(int i, Channel capacity, Channel speedDifference) {
+    return trace.get(capacity, i) > 0 && Math.abs(trace.get(speedDifference, i)) < SAME_SPEED;
+  }
+
+  /**
+   * Sliding power of a tyre, {@code Fx (omega R - vx) - Fy vy}: its force times the velocity with
+   * which its contact slides over the road.
+   */
+  private double tyre(int i, int wheel, double radius) {
+    double slip = block(Channel.SLIP_FL, wheel, i);
+    double rolling = block(Channel.WHEEL_SPEED_FL, wheel, i) * radius / (1 + slip);
+    double across = rolling * Math.tan(block(Channel.SLIP_ANGLE_FL, wheel, i));
+    return block(Channel.FX_FL, wheel, i) * rolling * slip
+        - block(Channel.FY_FL, wheel, i) * across;
+  }
+
+  private double block(Channel first, int wheel, int i) {
+    return trace.get(Channel.values()[first.ordinal() + wheel], i);
+  }
+
+  private Car car() {
+    return lap.request().car();
+  }
+}
