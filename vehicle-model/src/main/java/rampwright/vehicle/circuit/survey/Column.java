@@ -35,6 +35,23 @@ public enum Column {
       "lateral",
       "accy",
       "accelerationy"),
+  LONGITUDINAL_ACCELERATION(
+      Dimension.ACCELERATION,
+      Quantity.si(
+          "longitudinal_acceleration_mps2",
+          "longitudinal acceleration",
+          "m/s²",
+          -80,
+          80,
+          "the unit of the column is another"),
+      "longitudinal_acceleration",
+      "ax",
+      "longacc",
+      "longitudinalacc",
+      "longg",
+      "longitudinal",
+      "accx",
+      "accelerationx"),
   YAW_RATE(
       Dimension.ANGULAR_RATE,
       Quantity.si(

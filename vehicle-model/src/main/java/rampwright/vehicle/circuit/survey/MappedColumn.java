@@ -64,10 +64,11 @@ public record MappedColumn(Column column, String header, Unit unit, boolean reve
     return reversed ? -unit.si() : unit.si();
   }
 
-  /** Returns the entry of a mapping, for example {@code speed=Speed (km/h)[km/h]}. */
+  /** Returns the entry of a mapping, for example {@code speed=Speed[km/h]}. */
   @Override
   public String toString() {
-    return column.key() + "=" + (reversed ? "-" : "") + header + "[" + unit.symbol() + "]";
+    String title = Header.of(header).title();
+    return column.key() + "=" + (reversed ? "-" : "") + title + "[" + unit.symbol() + "]";
   }
 
   static String list(List<MappedColumn> columns) {
