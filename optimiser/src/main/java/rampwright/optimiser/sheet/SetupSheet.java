@@ -1,0 +1,105 @@
+package rampwright.optimiser.sheet;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import rampwright.optimiser.event.SettingLimit;
+import rampwright.vehicle.Conditions;
+import rampwright.vehicle.Driver;
+import rampwright.vehicle.differential.PlateBuild;
+
+/**
+ * Everything that stands on a setup sheet, in SI units.
+ *
+ * @param event name of the event
+ * @param setting name of the setting to be built
+ * @param car name of the car
+ * @param conditions for which the effect was computed
+ * @param driver whose limits the laps keep
+ * @param kit name of the parts kit
+ * @param build the unit as built
+ * @param stack order of the plates on each side
+ * @param bench what the bench must show
+ * @param change what is to be changed from the setting that is in the car
+ * @param laps expected effect, one for each circuit of the event, in its order
+ * @param limits the event's limits and the values of this setting
+ * @param cautions what the crew must not forget
+ */
+public record SetupSheet(
+    String event,
+    String setting,
+    String car,
+    Conditions conditions,
+    Driver driver,
+    String kit,
+    PlateBuild build,
+    PlateStack stack,
+    BenchCheck bench,
+    SettingChange change,
+    List<ExpectedLap> laps,
+    List<LimitLine> limits,
+    List<String> cautions) {
+  /** Copies the lists. */
+  public SetupSheet {
+    laps = List.copyOf(laps);
+    limits = List.copyOf(limits);
+    cautions = List.copyOf(cautions);
+  }
+
+  /**
+   * What a circuit answers to the setting.
+   *
+   * @param circuit name of the circuit
+   * @param weight how much its lap time counts (-)
+   * @param lapTime lap time of this setting (s)
+   * @param currentLapTime lap time of the setting that is in the car (s)
+   * @param corners difference by corner in driving order; with {@code outside} they add up to the
+   *     difference of the lap times
+   * @param outside difference outside corners (s)
+   */
+  public record ExpectedLap(
+      String circuit,
+      double weight,
+      double lapTime,
+      double currentLapTime,
+      List<CornerEffect> corners,
+      double outside) {
+    /** Copies the corners. */
+    public ExpectedLap {
+      corners = List.copyOf(corners);
+    }
+
+    /** Returns this setting's lap time less the current one's (s); negative is faster. */
+    public double difference() {
+      return lapTime - currentLapTime;
+    }
+  }
+
+  /**
+   * Effect in one corner.
+   *
+   * @param number 1 for the first after the start line
+   * @param distance distance of its slowest point (m)
+   * @param slowestSpeed speed there with the current setting (m/s)
+   * @param difference time of this setting less the current one's (s); negative is faster
+   * @param cause the largest cause in words, empty when nothing differs
+   */
+  public record CornerEffect(
+      int number, double distance, double slowestSpeed, double difference, String cause) {}
+
+  /**
+   * A limit of the event.
+   *
+   * @param limit measure and limit (SI)
+   * @param value the setting's value (SI); empty where it is not known
+   */
+  public record LimitLine(SettingLimit limit, OptionalDouble value) {
+    /** Returns whether the limit is met; empty where the value is not known. */
+    public Optional<Boolean> met() {
+      if (value.isEmpty()) {
+        return Optional.empty();
+      }
+      return Optional.of(limit.measure().violation(value.getAsDouble(), limit.value()) == 0);
+    }
+  }
+}

@@ -1,0 +1,221 @@
+package rampwright.optimiser.sheet;
+
+import java.util.List;
+import java.util.stream.Collector;
+import java.util.stream.Collectors;
+import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
+import rampwright.vehicle.Conditions;
+import rampwright.vehicle.differential.PlateBuild;
+import rampwright.vehicle.differential.RingSet;
+
+/** The page of a sheet as XHTML: head, what to build, how to check it, what to expect. */
+final class SheetHtml {
+  /** Longest name that is printed whole. */
+  static final int LONGEST_NAME = 90;
+
+  private final SetupSheet sheet;
+  private final Markup page = new Markup();
+
+  private SheetHtml(SetupSheet sheet) {
+    this.sheet = sheet;
+  }
+
+  /**
+   * Returns the page.
+   *
+   * @param style the style sheet
+   * @param size font size (pt)
+   * @param corners most corners to be listed for one circuit
+   */
+  static String of(SetupSheet sheet, String style, double size, int corners) {
+    SheetHtml html = new SheetHtml(sheet);
+    html.page
+        .raw("<html><head><title>")
+        .words("Setup sheet: " + sheet.setting())
+        .raw(
+            "</title><style>" + style + "body { font-size: " + size + "pt; }</style></head><body>");
+    html.head();
+    html.facts();
+    html.tiles();
+    html.drawings();
+    html.benchAndChange();
+    html.page.raw(new EffectSection(sheet, corners).html());
+    html.cautions();
+    html.signatures();
+    return html.page.raw("</body></html>").toString();
+  }
+
+  private void head() {
+    page.raw("<table class='head'><tr><td style='width:13mm'>" + mark() + "</td><td>")
+        .element("div", "class='kind'", "SETUP SHEET · PLATE DIFFERENTIAL")
+        .element("h1", "", name(sheet.setting()))
+        .raw("</td><td style='width:33mm'><div class='box'>&#160;Date</div></td>")
+        .raw("<td style='width:33mm'><div class='box'>&#160;Unit no.</div></td></tr></table>");
+  }
+
+  /** The mark: a ramp under a pin. */
+  private static String mark() {
+    Drawing drawing = new Drawing(10, 9);
+    drawing.polygon("fill='#000'", 0, 8.6, 10, 8.6, 10, 2.6);
+    drawing.circle(3.6, 3.3, 2.2, "fill='none' stroke='#000' stroke-width='0.7'");
+    return drawing.svg();
+  }
+
+  private void facts() {
+    page.raw("<table class='facts'><tr>");
+    fact("Event", name(sheet.event()));
+    fact("Car", name(sheet.car()));
+    fact(
+        sheet.laps().size() == 1 ? "Circuit" : "Circuits",
+        sheet.laps().stream().map(ExpectedLap::circuit).map(SheetHtml::name).collect(list()));
+    page.raw("</tr><tr>");
+    fact("Conditions", conditions(sheet.conditions()));
+    fact(
+        "Driver backs off at",
+        "slide growth "
+            + Shown.brief(sheet.driver().powerGrowth(), 2)
+            + " 1/s on power, "
+            + Shown.brief(sheet.driver().brakingGrowth(), 2)
+            + " 1/s braking in a turn");
+    fact("Parts kit", name(sheet.kit()));
+    page.raw("</tr></table>");
+  }
+
+  private static Collector<CharSequence, ?, String> list() {
+    return Collectors.joining(", ");
+  }
+
+  private void fact(String label, String words) {
+    page.raw("<td>").element("b", "", label + ": ").words(words).raw("</td>");
+  }
+
+  private static String conditions(Conditions c) {
+    String wind =
+        c.windSpeed() == 0
+            ? "no wind"
+            : "wind "
+                + Shown.brief(c.windSpeed(), 1)
+                + " m/s from "
+                + Shown.degrees(c.windFrom())
+                + " to the circuit's x axis";
+    return "grip "
+        + Shown.brief(c.grip(), 3)
+        + ", fuel "
+        + Shown.brief(c.fuelMass(), 1)
+        + " kg, air "
+        + Shown.brief(c.airDensity(), 3)
+        + " kg/m³, "
+        + wind;
+  }
+
+  private void tiles() {
+    PlateBuild build = sheet.build();
+    RingSet set = build.ringSet();
+    page.raw("<table class='tiles'><tr>");
+    tile("Ring set", name(set.name()), facing(build));
+    tile(
+        "Ramps as fitted",
+        Shown.degrees(build.driveAngle()) + " / " + Shown.degrees(build.coastAngle()),
+        "drive / coast, flank to plane of rotation");
+    tile(
+        "Friction faces per side",
+        Integer.toString(build.facesPerSide()),
+        sheet.stack().plates().size() + " plates in the stack, see order");
+    tile(
+        "Preload, whole torque difference",
+        Shown.torque(build.preload()),
+        "spring force on each side " + Shown.number(build.preloadForce(), 0) + " N");
+    page.raw("</tr></table>");
+  }
+
+  private void tile(String label, String value, String note) {
+    page.raw("<td>")
+        .element("div", "class='label'", label)
+        .element("div", "class='big'", value)
+        .element("div", "class='label'", note)
+        .raw("</td>");
+  }
+
+  private static String facing(PlateBuild build) {
+    if (!build.ringSet().reversible()) {
+      return "fits one way only";
+    }
+    RingSet set = build.ringSet();
+    return (build.turned() ? "TURNED ROUND" : "NOT turned")
+        + ", stamped "
+        + Shown.degrees(set.driveAngle())
+        + " / "
+        + Shown.degrees(set.coastAngle());
+  }
+
+  private void drawings() {
+    page.raw("<table class='cols'><tr><td class='col' style='width:123mm'>")
+        .heading("Stack order, both sides alike (mirror image)")
+        .raw(StackDrawing.of(sheet.stack()))
+        .raw("<p class='small'>")
+        .element("b", "", "From the pressure ring outwards: ")
+        .words(sheet.stack().order() + ". ")
+        .words("C (white) turns with the case: " + count(PlateStack.Plate.CASE) + " per side. ")
+        .words("G (dark) turns with the side gear: " + count(PlateStack.Plate.GEAR) + " per side. ")
+        .words(
+            "Plates that do no work stay in, so that the stack keeps its height. Where shim and"
+                + " spring sit: maker's manual.")
+        .raw("</p></td><td class='col'>")
+        .heading("Ramps, seen from outside")
+        .raw(RampDrawing.of(sheet.build()))
+        .element(
+            "p",
+            "class='small'",
+            "Looking towards the axle. On power the flanks below the pin (DRIVE) push it and spread"
+                + " the rings, on overrun those above it (COAST).")
+        .raw("</td></tr></table>");
+  }
+
+  private int count(PlateStack.Plate kind) {
+    return sheet.stack().count(kind);
+  }
+
+  private void benchAndChange() {
+    page.raw("<table class='cols'><tr><td class='col' style='width:117mm'>")
+        .raw(new BenchSection(sheet).html())
+        .raw("</td><td class='gap'>")
+        .heading("Change from the setting in the car: " + name(sheet.change().from()));
+    List<String> steps = sheet.change().steps();
+    if (steps.isEmpty()) {
+      page.element("p", "", "Nothing to change: this is the setting in the car. Check it only.");
+    } else {
+      page.raw("<ul>");
+      steps.forEach(step -> page.element("li", "", step));
+      page.raw("</ul>");
+    }
+    page.element("p", "", time()).raw("</td></tr></table>");
+  }
+
+  private String time() {
+    if (sheet.change().time().isEmpty()) {
+      return "Time needed: not in the kit.";
+    }
+    double minutes = sheet.change().time().getAsDouble() / 60;
+    return "Time needed: " + Shown.brief(minutes, 0) + " min, on stands with the tools laid out.";
+  }
+
+  private void cautions() {
+    page.raw("<div class='warn'>").element("b", "", "Caution").raw("<ul>");
+    sheet.cautions().forEach(caution -> page.element("li", "class='small'", caution));
+    page.raw("</ul></div>");
+  }
+
+  private void signatures() {
+    page.raw("<table style='margin-top:0.6em'><tr>");
+    for (String who : List.of("Built by", "Bench checked by", "Released by")) {
+      page.raw("<td class='fill' style='height:2.6em'>")
+          .element("span", "class='small'", who + " (name, date, signature)")
+          .raw("</td>");
+    }
+    page.raw("</tr></table>");
+  }
+
+  private static String name(String name) {
+    return Shown.cut(name, LONGEST_NAME);
+  }
+}

@@ -1,0 +1,119 @@
+package rampwright.optimiser.sheet;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+import rampwright.optimiser.event.Event;
+import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
+import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.lap.LapSolver;
+import rampwright.vehicle.lap.LimitForm;
+
+class SetupSheetsTest {
+  private static final SetupSheet SHEET = SampleSheets.sheet();
+
+  // the sample kit by hand: 8 faces, friction 0.11, mean radius (52 + 36)/2 = 44 mm, ramps at 34 mm
+  private static final double PACK = 8 * 0.11 * 0.044;
+  private static final double K_DRIVE = share(40);
+  private static final double K_COAST = share(80);
+
+  private static double share(double degrees) {
+    return PACK / 0.034 / Math.tan(Math.toRadians(degrees) + Math.atan(0.08));
+  }
+
+  @Test
+  void forcesAndSharesFollowFromTheParts() {
+    assertThat(SHEET.build().preloadForce()).isCloseTo(80 / (2 * PACK), within(1e-9));
+    assertThat(SHEET.build().law().driveShare()).isCloseTo(K_DRIVE, within(1e-12));
+    assertThat(SHEET.build().law().coastShare()).isCloseTo(K_COAST, within(1e-12));
+  }
+
+  @Test
+  void halfThePreloadShowsWithTheOtherWheelHeldAndThePropshaftFree() {
+    assertThat(SHEET.bench().springsAlone().value()).isEqualTo(80);
+    assertThat(SHEET.bench().wheelHeld().value()).isEqualTo(40);
+    assertThat(SHEET.bench().wheelHeld().low()).isCloseTo(34, within(1e-12));
+    assertThat(SHEET.bench().wheelHeld().high()).isCloseTo(46, within(1e-12));
+  }
+
+  @Test
+  void aLockedPropshaftLoadsTheRampsThatItsReactionPressesOn() {
+    assertThat(SHEET.bench().lockedForwards().value()).isCloseTo(80 / (1 - K_COAST), within(1e-9));
+    // 8 faces at 40 degrees give a drive share above one: the harder one turns, the harder it holds
+    assertThat(K_DRIVE).isGreaterThan(1);
+    assertThat(SHEET.bench().lockedBackwards().breaksAway()).isFalse();
+  }
+
+  @Test
+  void everyChangeIsListedWithTheLongestTime() {
+    assertThat(SHEET.change().from()).isEqualTo("as raced");
+    assertThat(SHEET.change().steps())
+        .containsExactly(
+            "Ring set: take out 45/60, fit 40/80 not turned.",
+            "Plates: restack both sides from 6 to 8 faces per side, order as drawn.",
+            "Preload: from 60 to 80\u00a0N·m; another number of faces needs another spring force,"
+                + " so shim to the bench.");
+    assertThat(SHEET.change().time()).isEqualTo(OptionalDouble.of(3600));
+  }
+
+  @Test
+  void theSettingInTheCarNeedsNoChangeAndGainsNothing() {
+    Event event = SampleSheets.event();
+    SetupSheet sheet = SetupSheets.of(event, event.current());
+    assertThat(sheet.change().steps()).isEmpty();
+    assertThat(sheet.change().time()).isEqualTo(OptionalDouble.of(0));
+    assertThat(sheet.laps().get(0).difference()).isZero();
+  }
+
+  @Test
+  void aUnitOfAnotherKindIsTakenOutWhole() {
+    Event event = SampleSheets.eventWithCurrent("open");
+    SettingChange change = SetupSheets.of(event, event.setting("harder")).change();
+    assertThat(change.time()).isEmpty();
+    assertThat(change.steps())
+        .containsExactly(
+            "Take out the differential that is in the car; fit the kit's unit as drawn.");
+  }
+
+  @Test
+  void lapTimesAreThoseOfTheSolver() {
+    Event event = SampleSheets.event();
+    ExpectedLap lap = SHEET.laps().get(0);
+    assertThat(lap.lapTime()).isEqualTo(solved(event, "harder"));
+    assertThat(lap.currentLapTime()).isEqualTo(solved(event, "as raced"));
+    assertThat(lap.weight()).isEqualTo(2);
+  }
+
+  private static double solved(Event event, String setting) {
+    return LapSolver.solve(
+            event.lapRequest(
+                event.setting(setting), event.circuits().get(0).circuit(), LimitForm.DRIVER))
+        .time();
+  }
+
+  @Test
+  void limitsOfThePartsAreJudged() {
+    assertThat(SHEET.limits())
+        .extracting(line -> line.limit().measure().name() + " " + line.met())
+        .containsExactly(
+            "PRELOAD_MIN " + Optional.of(false),
+            "DRIVE_SHARE_MAX " + Optional.of(false),
+            "COAST_SHARE_MAX " + Optional.of(true));
+    assertThat(SHEET.limits().get(1).value().orElseThrow()).isCloseTo(K_DRIVE, within(1e-12));
+  }
+
+  @Test
+  void aDifferentialThatTheKitCannotBuildHasNoSheet() {
+    Event event = SampleSheets.event();
+    assertThatExceptionOfType(InvalidInput.class)
+        .isThrownBy(() -> SetupSheets.of(event, event.setting("open")))
+        .withMessage(
+            "The setting of a setup sheet (open) must be built from the parts kit; a differential"
+                + " that is only compared with has no parts to fit. Maybe use one of: [as raced,"
+                + " harder].");
+  }
+}
