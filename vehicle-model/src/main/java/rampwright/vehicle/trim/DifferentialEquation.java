@@ -11,12 +11,15 @@ import rampwright.vehicle.differential.Differential;
  * capacity {@code C}, the speed difference {@code dw} and a speed scale {@code w},
  *
  * <pre>
- *   z = Df/C + dw/w      |z| &lt;= 1: dw = 0      otherwise: Df = C sign(z)
+ *   z = Df + max(C, C0) dw/w      |z| &lt;= C: dw = 0      otherwise: Df = C sign(z)
  * </pre>
  *
  * which is the semi-smooth form of the law: any solution has {@code |Df| <= C} and slides in the
- * direction of its friction. The row's sign is chosen so that it rises with the speed of the left
- * output whether sticking or sliding.
+ * direction of its friction, whatever weight the speed difference has. With a weight that vanished
+ * with the capacity, Newton's method would take every small error of the torques for sticking or
+ * sliding the other way; so the weight stays of the order of what the tyres' stiffness gives. The
+ * row's sign is chosen so that it rises with the speed of the left output whether sticking or
+ * sliding.
  */
 final class DifferentialEquation {
   /** How the outputs stand to each other. */
@@ -27,6 +30,9 @@ final class DifferentialEquation {
     /** No friction: only the torque difference of viscous shear, or none. */
     FRICTIONLESS
   }
+
+  /** Least weight of the speed difference in the choice of state, as a share of weight x radius. */
+  private static final double LEAST_WEIGHT = 0.15;
 
   private final Differential law;
   private final LinearForm differenceOf;
@@ -92,8 +98,10 @@ final class DifferentialEquation {
     } else if (capacity <= 1e-12 * torqueScale) {
       state = State.FRICTIONLESS;
     } else {
-      double z = friction / capacity + speedDifference / speedScale;
-      state = z > 1 ? State.LEFT_FASTER : z < -1 ? State.RIGHT_FASTER : State.STICKING;
+      double weight = Math.max(capacity, LEAST_WEIGHT * torqueScale);
+      double z = friction + weight * speedDifference / speedScale;
+      state =
+          z > capacity ? State.LEFT_FASTER : z < -capacity ? State.RIGHT_FASTER : State.STICKING;
     }
     residual =
         switch (state) {

@@ -1,0 +1,141 @@
+package rampwright.vehicle.trim;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import rampwright.vehicle.Car;
+import rampwright.vehicle.Conditions;
+import rampwright.vehicle.chassis.WheelLoads;
+import rampwright.vehicle.differential.Differential;
+import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.driveline.DriveLayout;
+
+/**
+ * Demands of a trim on a flat road everything that makes it one, from its record alone: forces, yaw
+ * moment, wheel torques, loads, kinematics and the law of every differential.
+ */
+public final class TrimCheck {
+  /** Tolerance as a share of weight, of weight times wheelbase and of weight times radius. */
+  private static final double TOLERANCE = 1e-6;
+
+  private final PlanarCar planar;
+  private final DifferentialSet set;
+  private final double weight;
+
+  /** Prepares the check of one car with its differentials. */
+  public TrimCheck(Car car, Conditions conditions, DifferentialSet set) {
+    this.planar = new PlanarCar(car, conditions);
+    this.set = set;
+    this.weight = planar.mass * WheelLoads.GRAVITY;
+  }
+
+  /** Fails unless the trim balances. */
+  public void check(Trim t) {
+    checkMotion(t);
+    checkTorques(t);
+  }
+
+  private void checkMotion(Trim t) {
+    double[] slips = new double[4];
+    for (int i = 0; i < 4; i++) {
+      slips[i] = t.wheels().get(i).slip();
+    }
+    double along = t.ax() + planar.drag(t.speed()) / planar.mass;
+    double across = t.speed() * t.speed() * t.curvature();
+    double c = Math.cos(t.sideslip());
+    double s = Math.sin(t.sideslip());
+    // the path's tangent is (c, s) in the body, its normal (-s, c)
+    double specificX = along * c - across * s;
+    double specificY = along * s + across * c;
+    PlanarCar.Motion m =
+        planar.at(
+            t.speed(),
+            t.sideslip(),
+            t.speed() * t.curvature(),
+            t.steer(),
+            specificX,
+            specificY,
+            slips);
+    for (int i = 0; i < 4; i++) {
+      WheelState w = t.wheels().get(i);
+      assertThat(w.fz()).as("fz %d", i).isCloseTo(m.load[i], within(TOLERANCE * weight));
+      assertThat(w.fx()).as("fx %d", i).isCloseTo(m.fx[i], within(TOLERANCE * weight));
+      assertThat(w.fy()).as("fy %d", i).isCloseTo(m.fy[i], within(TOLERANCE * weight));
+      assertThat(w.slipAngle()).as("angle %d", i).isCloseTo(m.slipAngle[i], within(1e-9));
+      assertThat(w.speed()).as("speed %d", i).isCloseTo(m.wheelSpeed[i], within(1e-6));
+    }
+    assertThat(m.forceX).as("force").isCloseTo(planar.mass * specificX, within(TOLERANCE * weight));
+    assertThat(m.forceY).as("side").isCloseTo(planar.mass * specificY, within(TOLERANCE * weight));
+    double yawAcceleration = t.speed() * t.speed() * t.curvatureGradient() + t.curvature() * t.ax();
+    assertThat(m.yawMoment)
+        .as("yaw moment")
+        .isCloseTo(
+            planar.inertia * yawAcceleration,
+            within(TOLERANCE * weight * planar.car.chassis().wheelbase()));
+  }
+
+  private void checkTorques(Trim t) {
+    double share = planar.car.brakes().frontShare();
+    double frontBrake = share * t.brakeTorque() / 2;
+    double rearBrake = (1 - share) * t.brakeTorque() / 2;
+    double[] driven = new double[4];
+    double scale = TOLERANCE * weight * planar.radius(2);
+    for (int i = 0; i < 4; i++) {
+      WheelState w = t.wheels().get(i);
+      driven[i] = w.fx() * planar.radius(i) + (i < 2 ? frontBrake : rearBrake);
+    }
+    DriveLayout layout = planar.car.driveline().layout();
+    axle(driven, t, 0, layout != DriveLayout.REAR ? set.front() : null, scale);
+    axle(driven, t, 2, layout != DriveLayout.FRONT ? set.rear() : null, scale);
+    double cage = driven[0] + driven[1] + driven[2] + driven[3];
+    assertThat(t.cageTorque()).as("cage torque").isCloseTo(cage, within(scale));
+    if (layout == DriveLayout.ALL) {
+      double q = planar.car.driveline().frontTorqueShare();
+      double front = driven[0] + driven[1];
+      double rear = driven[2] + driven[3];
+      double difference = 2 * q * rear - 2 * (1 - q) * front;
+      double speed = (speed(t, 0) + speed(t, 1) - speed(t, 2) - speed(t, 3)) / 2;
+      law(set.centre(), cage, difference, speed, scale, t.centre());
+    }
+  }
+
+  private static double speed(Trim t, int wheel) {
+    return t.wheels().get(wheel).speed();
+  }
+
+  private void axle(double[] driven, Trim t, int left, Differential law, double scale) {
+    if (law == null) {
+      assertThat(driven[left]).as("free wheel").isCloseTo(0, within(scale));
+      assertThat(driven[left + 1]).as("free wheel").isCloseTo(0, within(scale));
+      return;
+    }
+    double cage = driven[left] + driven[left + 1];
+    double difference = driven[left + 1] - driven[left];
+    law(law, cage, difference, speed(t, left) - speed(t, left + 1), scale, t.axles().get(left / 2));
+  }
+
+  /** Sticks with equal speeds below its capacity, or slides at it from the faster to the slower. */
+  private static void law(
+      Differential law,
+      double cage,
+      double difference,
+      double speedDifference,
+      double scale,
+      DifferentialState told) {
+    double capacity = law.capacity(cage);
+    double friction = difference - law.viscousTorque(speedDifference);
+    if (told.sticking()) {
+      assertThat(speedDifference).as("sticking").isCloseTo(0, within(1e-6));
+      assertThat(Math.abs(friction)).as("within capacity").isLessThanOrEqualTo(capacity + scale);
+    } else {
+      assertThat(friction)
+          .as("sliding at capacity")
+          .isCloseTo(Math.signum(speedDifference) * capacity, within(scale));
+    }
+    assertThat(told.torqueDifference()).isCloseTo(Math.abs(difference), within(scale));
+    assertThat(told.speedDifference()).isCloseTo(Math.abs(speedDifference), within(1e-6));
+    assertThat(told.cageTorque()).isCloseTo(cage, within(scale));
+    assertThat(difference * speedDifference).as("heat").isGreaterThanOrEqualTo(-1e-6 * scale);
+    assertThat(told.slidingPower()).isGreaterThanOrEqualTo(0);
+  }
+}
