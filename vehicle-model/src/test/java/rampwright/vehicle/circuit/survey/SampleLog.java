@@ -61,8 +61,8 @@ public final class SampleLog {
 
   private SampleLog() {}
 
-  /** Returns the lap behind the log. */
-  static Lap lap(Circuit circuit) {
+  /** Returns the lap behind the log, solved at a spacing (m). */
+  static Lap lap(Circuit circuit, double spacing) {
     FileSource samples = FileSource.classPath(SampleFiles.class.getClassLoader(), SampleFiles.BASE);
     return LapSolver.solve(
         new LapRequest(
@@ -72,14 +72,14 @@ public final class SampleLog {
             Driver.QUICK,
             LimitForm.DRIVER,
             circuit,
-            2));
+            spacing));
   }
 
   /** Writes the file into the folder of the samples. */
   public static void main(String[] folder) throws IOException {
     Path file = Path.of(folder[0]).resolve(PATH);
     Files.createDirectories(file.getParent());
-    Files.writeString(file, text(lap(SampleCircuits.fast())), StandardCharsets.UTF_8);
+    Files.writeString(file, text(lap(SampleCircuits.fast(), 2)), StandardCharsets.UTF_8);
   }
 
   static String text(Lap lap) {
