@@ -1,0 +1,2 @@
+/** Small parts that several areas of the page share: numbers with units, notices, waiting. */
+package rampwright.web.widget;
