@@ -93,6 +93,21 @@ public record PartsKit(
       FACES.check(faces);
       RING_SET.check(ringSet);
     }
+
+    /**
+     * Returns the time (s) to change from one setting to another: that of the largest job, because
+     * the unit is taken apart once and the larger job includes the smaller.
+     */
+    public double between(KitSetting from, KitSetting to) {
+      double time = from.preload() == to.preload() ? 0 : preload;
+      if (from.facesPerSide() != to.facesPerSide()) {
+        time = Math.max(time, faces);
+      }
+      if (!from.ringSet().equals(to.ringSet()) || from.turned() != to.turned()) {
+        time = Math.max(time, ringSet);
+      }
+      return time;
+    }
   }
 
   /** Checks that the kit has parts and that names are unique. */

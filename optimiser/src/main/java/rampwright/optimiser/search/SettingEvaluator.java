@@ -1,0 +1,105 @@
+package rampwright.optimiser.search;
+
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import rampwright.optimiser.event.Event;
+import rampwright.optimiser.event.LimitedMeasure;
+import rampwright.optimiser.event.NamedSetting;
+import rampwright.optimiser.event.SettingLimit;
+import rampwright.optimiser.event.WeightedCircuit;
+import rampwright.optimiser.kit.KitSetting;
+import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.differential.PlateBuild;
+import rampwright.vehicle.differential.PlateDifferential;
+import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.lap.LapSolver;
+import rampwright.vehicle.lap.LimitForm;
+
+/**
+ * Lap time and limits of settings of one event. The same setting always has the same answer; laps
+ * are kept by law, so that builds that drive alike cost one lap per circuit. May be used by several
+ * threads at once.
+ */
+public final class SettingEvaluator {
+  private final Event event;
+  private final Map<DifferentialSet, LapFigures> known = new ConcurrentHashMap<>();
+
+  private SettingEvaluator(Event event) {
+    this.event = event;
+    if (event.circuits().stream().noneMatch(circuit -> circuit.weight() > 0)) {
+      throw InvalidInput.value(
+          "largest weight of a circuit", 0, "", "above 0", "give one the weight 1");
+    }
+  }
+
+  /**
+   * Returns the evaluator of an event.
+   *
+   * @throws InvalidInput when no circuit counts
+   */
+  public static SettingEvaluator of(Event event) {
+    return new SettingEvaluator(event);
+  }
+
+  /**
+   * Evaluates a setting.
+   *
+   * @throws InvalidInput when the kit cannot build it or the car cannot follow a circuit with it
+   */
+  public EvaluatedSetting evaluate(KitSetting setting) {
+    PlateBuild build = event.kit().build(setting);
+    PlateDifferential law = build.law();
+    LapFigures figures = figures(event.built("evaluated", setting).differentials());
+    Map<LimitedMeasure, Double> measures = partMeasures(law);
+    List<LimitCheck> limits = new ArrayList<>();
+    for (SettingLimit limit : event.limits()) {
+      Optional.ofNullable(measures.get(limit.measure()))
+          .ifPresent(value -> limits.add(new LimitCheck(limit, value)));
+    }
+    double violation = limits.stream().mapToDouble(LimitCheck::violation).sum();
+    return new EvaluatedSetting(setting, law, figures.lapTime(), measures, limits, violation);
+  }
+
+  /** Returns the excess over the limits that stand on the parts alone: it needs no lap. */
+  double partViolation(PlateDifferential law) {
+    Map<LimitedMeasure, Double> measures = partMeasures(law);
+    return event.limits().stream()
+        .filter(limit -> measures.containsKey(limit.measure()))
+        .mapToDouble(limit -> new LimitCheck(limit, measures.get(limit.measure())).violation())
+        .sum();
+  }
+
+  private static Map<LimitedMeasure, Double> partMeasures(PlateDifferential law) {
+    Map<LimitedMeasure, Double> measures = new EnumMap<>(LimitedMeasure.class);
+    measures.put(LimitedMeasure.PRELOAD_MIN, law.preload());
+    measures.put(LimitedMeasure.PRELOAD_MAX, law.preload());
+    measures.put(LimitedMeasure.DRIVE_SHARE_MAX, law.driveShare());
+    measures.put(LimitedMeasure.COAST_SHARE_MAX, law.coastShare());
+    return measures;
+  }
+
+  private LapFigures figures(DifferentialSet differentials) {
+    LapFigures figures = known.get(differentials);
+    if (figures == null) {
+      figures = solve(differentials);
+      known.put(differentials, figures);
+    }
+    return figures;
+  }
+
+  private LapFigures solve(DifferentialSet differentials) {
+    NamedSetting setting = new NamedSetting("evaluated", Optional.empty(), differentials);
+    double time = 0;
+    for (WeightedCircuit circuit : event.circuits()) {
+      time +=
+          circuit.weight()
+              * LapSolver.solve(event.lapRequest(setting, circuit.circuit(), LimitForm.DRIVER))
+                  .time();
+    }
+    return new LapFigures(time);
+  }
+}
