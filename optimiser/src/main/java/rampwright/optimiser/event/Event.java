@@ -9,6 +9,7 @@ import rampwright.vehicle.Car;
 import rampwright.vehicle.Conditions;
 import rampwright.vehicle.Driver;
 import rampwright.vehicle.circuit.Circuit;
+import rampwright.vehicle.file.Suggestion;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.lap.LapRequest;
 import rampwright.vehicle.lap.LimitForm;
@@ -74,13 +75,13 @@ public record Event(
     return settings.stream()
         .filter(s -> s.name().equals(wanted))
         .findFirst()
-        .orElseThrow(
-            () ->
-                InvalidInput.of(
-                    "setting",
-                    wanted,
-                    "one of the event's: " + settings.stream().map(NamedSetting::name).toList(),
-                    ""));
+        .orElseThrow(() -> unknown(wanted));
+  }
+
+  private InvalidInput unknown(String wanted) {
+    List<String> names = settings.stream().map(NamedSetting::name).toList();
+    String advice = Suggestion.nearest(wanted, names).map(near -> "you meant " + near).orElse("");
+    return InvalidInput.of("setting", wanted, "one of the event's: " + names, advice);
   }
 
   /** Returns the setting that is in the car now. */

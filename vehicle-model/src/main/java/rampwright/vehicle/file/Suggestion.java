@@ -6,11 +6,11 @@ import java.util.Locale;
 import java.util.Optional;
 
 /** The known word that a mistyped one probably stands for. */
-final class Suggestion {
+public final class Suggestion {
   private Suggestion() {}
 
   /** Returns the nearest of the known words, empty when none is near. */
-  static Optional<String> nearest(String word, Collection<String> known) {
+  public static Optional<String> nearest(String word, Collection<String> known) {
     String plain = plain(word);
     return known.stream()
         .filter(candidate -> near(plain, plain(candidate)))

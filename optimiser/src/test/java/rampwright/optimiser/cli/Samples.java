@@ -1,0 +1,25 @@
+package rampwright.optimiser.cli;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import rampwright.samples.SampleFile;
+import rampwright.samples.SampleFiles;
+
+/** The samples as files of a user's. */
+final class Samples {
+  private Samples() {}
+
+  /** Copies every sample below a folder and returns the folder. */
+  static Path copy(Path folder) throws IOException {
+    for (SampleFile sample : SampleFiles.list()) {
+      Path to = folder.resolve(sample.path());
+      Files.createDirectories(to.getParent());
+      try (InputStream in = SampleFiles.open(sample.path())) {
+        Files.copy(in, to);
+      }
+    }
+    return folder;
+  }
+}
