@@ -40,10 +40,15 @@ final class EffectSection {
           .cell("num", Shown.lapTime(lap.currentLapTime()))
           .cell("num", Shown.lapTime(lap.lapTime()))
           .raw("<td class='num'>")
-          .element("b", "", Shown.signed(lap.difference(), 3) + " s")
+          .element("b", "", Shown.signed(lap.difference(), 3) + "\u00a0s")
           .raw("</td></tr>");
     }
-    html.raw("</table>");
+    html.raw("</table>")
+        .element(
+            "p",
+            "class='small'",
+            "Minus is faster. A driver's laps scatter by 0.1 to 0.2 s (common practice, no source):"
+                + " a smaller difference shows in no single lap.");
   }
 
   private void corners() {
@@ -63,7 +68,8 @@ final class EffectSection {
 
   private void corners(ExpectedLap lap) {
     List<CornerEffect> listed = listed(lap.corners());
-    html.raw("<table class='rows small'><tr><th style='width:14%'>Corner</th>")
+    html.element("p", "class='sub'", Shown.cut(lap.circuit(), 45) + ", corner by corner")
+        .raw("<table class='rows small'><tr><th style='width:14%'>Corner</th>")
         .raw(
             "<th style='width:17%' class='num'>at m</th><th style='width:17%' class='num'>km/h</th>")
         .raw("<th style='width:20%' class='num'>Diff. s</th><th>Mainly</th></tr>");

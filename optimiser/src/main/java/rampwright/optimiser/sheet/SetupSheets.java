@@ -6,14 +6,10 @@ import java.util.OptionalDouble;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.event.SettingLimit;
-import rampwright.optimiser.event.WeightedCircuit;
 import rampwright.optimiser.kit.KitSetting;
-import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.optimiser.sheet.SetupSheet.LimitLine;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.input.InvalidInput;
-import rampwright.vehicle.lap.LapSolver;
-import rampwright.vehicle.lap.LimitForm;
 
 /** Makes the content of setup sheets. */
 public final class SetupSheets {
@@ -48,7 +44,9 @@ public final class SetupSheets {
         PlateStack.of(event.kit(), wanted.facesPerSide()),
         BenchCheck.of(build, event.kit().preload().step()),
         SettingChange.of(event.kit(), event.current(), wanted),
-        event.circuits().stream().map(circuit -> lap(event, setting, circuit)).toList(),
+        event.circuits().stream()
+            .map(circuit -> LapComparison.of(event, setting, circuit))
+            .toList(),
         event.limits().stream().map(limit -> line(limit, build)).toList(),
         CAUTIONS);
   }
@@ -65,20 +63,6 @@ public final class SetupSheets {
         setting.name(),
         "built from the parts kit; a differential that is only compared with has no parts to fit",
         built.isEmpty() ? "give the event a setting from its kit" : "use one of: " + built);
-  }
-
-  private static ExpectedLap lap(Event event, NamedSetting setting, WeightedCircuit circuit) {
-    double time = time(event, setting, circuit);
-    double current =
-        setting.differentials().equals(event.current().differentials())
-            ? time
-            : time(event, event.current(), circuit);
-    return new ExpectedLap(
-        circuit.circuit().name(), circuit.weight(), time, current, List.of(), time - current);
-  }
-
-  private static double time(Event event, NamedSetting setting, WeightedCircuit circuit) {
-    return LapSolver.solve(event.lapRequest(setting, circuit.circuit(), LimitForm.DRIVER)).time();
   }
 
   private static LimitLine line(SettingLimit limit, PlateBuild build) {

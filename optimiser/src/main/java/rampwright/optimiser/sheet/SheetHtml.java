@@ -1,9 +1,7 @@
 package rampwright.optimiser.sheet;
 
+import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collector;
-import java.util.stream.Collectors;
-import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.vehicle.Conditions;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.RingSet;
@@ -12,6 +10,9 @@ import rampwright.vehicle.differential.RingSet;
 final class SheetHtml {
   /** Longest name that is printed whole. */
   static final int LONGEST_NAME = 90;
+
+  /** Words shorter than this stay on one line. */
+  private static final int LONGEST_WHOLE = 40;
 
   private final SetupSheet sheet;
   private final Markup page = new Markup();
@@ -63,49 +64,41 @@ final class SheetHtml {
 
   private void facts() {
     page.raw("<table class='facts'><tr>");
-    fact("Event", name(sheet.event()));
-    fact("Car", name(sheet.car()));
-    fact(
-        sheet.laps().size() == 1 ? "Circuit" : "Circuits",
-        sheet.laps().stream().map(ExpectedLap::circuit).map(SheetHtml::name).collect(list()));
-    page.raw("</tr><tr>");
+    fact("Event", List.of(name(sheet.event())));
+    fact("Car", List.of(name(sheet.car())));
+    fact("Parts kit", List.of(name(sheet.kit())));
+    page.raw("</tr></table><table class='facts'><tr>");
     fact("Conditions", conditions(sheet.conditions()));
     fact(
-        "Driver backs off at",
-        "slide growth "
-            + Shown.brief(sheet.driver().powerGrowth(), 2)
-            + " 1/s on power, "
-            + Shown.brief(sheet.driver().brakingGrowth(), 2)
-            + " 1/s braking in a turn");
-    fact("Parts kit", name(sheet.kit()));
+        "Driver backs off at slide growth",
+        List.of(
+            Shown.brief(sheet.driver().powerGrowth(), 2) + " 1/s on power,",
+            Shown.brief(sheet.driver().brakingGrowth(), 2) + " 1/s braking in a turn"));
     page.raw("</tr></table>");
   }
 
-  private static Collector<CharSequence, ?, String> list() {
-    return Collectors.joining(", ");
+  /** Adds a fact; a line may end between its words, and within them only when they are too long. */
+  private void fact(String label, List<String> words) {
+    page.raw("<td>").element("b", "", label + ":");
+    for (String word : words) {
+      boolean whole = word.length() < LONGEST_WHOLE;
+      page.raw(" ").element("span", whole ? "style='white-space:nowrap'" : "", word);
+    }
+    page.raw("</td>");
   }
 
-  private void fact(String label, String words) {
-    page.raw("<td>").element("b", "", label + ": ").words(words).raw("</td>");
-  }
-
-  private static String conditions(Conditions c) {
-    String wind =
-        c.windSpeed() == 0
-            ? "no wind"
-            : "wind "
-                + Shown.brief(c.windSpeed(), 1)
-                + " m/s from "
-                + Shown.degrees(c.windFrom())
-                + " to the circuit's x axis";
-    return "grip "
-        + Shown.brief(c.grip(), 3)
-        + ", fuel "
-        + Shown.brief(c.fuelMass(), 1)
-        + " kg, air "
-        + Shown.brief(c.airDensity(), 3)
-        + " kg/m³, "
-        + wind;
+  private static List<String> conditions(Conditions c) {
+    List<String> words = new ArrayList<>();
+    words.add("grip " + Shown.brief(c.grip(), 3) + ",");
+    words.add("fuel " + Shown.brief(c.fuelMass(), 1) + " kg,");
+    words.add("air " + Shown.brief(c.airDensity(), 3) + " kg/m³,");
+    if (c.windSpeed() == 0) {
+      words.add("no wind");
+    } else {
+      words.add("wind " + Shown.brief(c.windSpeed(), 1) + " m/s");
+      words.add("from " + Shown.degrees(c.windFrom()) + " to the circuit's x axis");
+    }
+    return words;
   }
 
   private void tiles() {
@@ -116,15 +109,15 @@ final class SheetHtml {
     tile(
         "Ramps as fitted",
         Shown.degrees(build.driveAngle()) + " / " + Shown.degrees(build.coastAngle()),
-        "drive / coast, flank to plane of rotation");
+        "drive / coast, as stamped");
     tile(
         "Friction faces per side",
         Integer.toString(build.facesPerSide()),
-        sheet.stack().plates().size() + " plates in the stack, see order");
+        sheet.stack().plates().size() + " plates on each side, see order");
     tile(
-        "Preload, whole torque difference",
+        "Preload, whole difference",
         Shown.torque(build.preload()),
-        "spring force on each side " + Shown.number(build.preloadForce(), 0) + " N");
+        "springs press with " + Shown.number(build.preloadForce(), 0) + "\u00a0N on each side");
     page.raw("</tr></table>");
   }
 
@@ -166,8 +159,9 @@ final class SheetHtml {
         .element(
             "p",
             "class='small'",
-            "Looking towards the axle. On power the flanks below the pin (DRIVE) push it and spread"
-                + " the rings, on overrun those above it (COAST).")
+            "Looking towards the axle; angle between flank and plane of rotation (upright here). On"
+                + " power the flanks below the pin (DRIVE) push it and spread the rings, on overrun"
+                + " those above it (COAST).")
         .raw("</td></tr></table>");
   }
 
@@ -179,14 +173,12 @@ final class SheetHtml {
     page.raw("<table class='cols'><tr><td class='col' style='width:117mm'>")
         .raw(new BenchSection(sheet).html())
         .raw("</td><td class='gap'>")
-        .heading("Change from the setting in the car: " + name(sheet.change().from()));
+        .heading("Change from “" + name(sheet.change().from()) + "”, now in the car");
     List<String> steps = sheet.change().steps();
     if (steps.isEmpty()) {
       page.element("p", "", "Nothing to change: this is the setting in the car. Check it only.");
     } else {
-      page.raw("<ul>");
-      steps.forEach(step -> page.element("li", "", step));
-      page.raw("</ul>");
+      steps.forEach(step -> page.element("p", "class='tick'", "☐ " + step));
     }
     page.element("p", "", time()).raw("</td></tr></table>");
   }
@@ -206,13 +198,13 @@ final class SheetHtml {
   }
 
   private void signatures() {
-    page.raw("<table style='margin-top:0.6em'><tr>");
+    page.raw("<table class='signatures'><tr>");
     for (String who : List.of("Built by", "Bench checked by", "Released by")) {
       page.raw("<td class='fill' style='height:2.6em'>")
           .element("span", "class='small'", who + " (name, date, signature)")
           .raw("</td>");
     }
-    page.raw("</tr></table>");
+    page.raw("</tr></table>").heading("Notes of crew and driver");
   }
 
   private static String name(String name) {

@@ -12,6 +12,8 @@ import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.pdmodel.PDDocumentInformation;
+import org.apache.pdfbox.pdmodel.PDPageContentStream;
+import org.apache.pdfbox.pdmodel.PDPageContentStream.AppendMode;
 
 /**
  * Sets a sheet on one A4 page. The same sheet gives the same bytes: no date is printed or stored.
@@ -37,6 +39,16 @@ public final class SheetPdf {
     }
   }
 
+  private static final float MILLIMETRE = 72 / 25.4f;
+
+  /** Margins of the page (pt), as in the style sheet. */
+  private static final float SIDE_MARGIN = 10 * MILLIMETRE;
+
+  private static final float LOWER_MARGIN = 7 * MILLIMETRE;
+
+  /** Height of a line to write on (pt). */
+  private static final float NOTE_LINE = 7 * MILLIMETRE;
+
   private SheetPdf() {}
 
   /**
@@ -53,6 +65,7 @@ public final class SheetPdf {
         renderer.createPDFWithoutClosing();
         PDDocument document = renderer.getPdfDocument();
         if (document.getNumberOfPages() == 1) {
+          ruleNotes(document, renderer.getLastContentBottom());
           save(document, out);
           return;
         }
@@ -70,6 +83,20 @@ public final class SheetPdf {
     builder.useSVGDrawer(new BatikSVGDrawer());
     builder.withHtmlContent(html, null);
     return builder.buildPdfRenderer();
+  }
+
+  /** Rules the rest of the page for notes, from a height above its lower edge (pt) downwards. */
+  private static void ruleNotes(PDDocument document, float from) throws IOException {
+    float right = document.getPage(0).getMediaBox().getWidth() - SIDE_MARGIN;
+    try (PDPageContentStream lines =
+        new PDPageContentStream(document, document.getPage(0), AppendMode.APPEND, true, true)) {
+      lines.setLineWidth(0.4f);
+      for (float y = from - NOTE_LINE; y > LOWER_MARGIN; y -= NOTE_LINE) {
+        lines.moveTo(SIDE_MARGIN, y);
+        lines.lineTo(right, y);
+      }
+      lines.stroke();
+    }
   }
 
   private static void save(PDDocument document, OutputStream out) throws IOException {

@@ -12,6 +12,9 @@ import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.optimiser.sheet.SetupSheet.LimitLine;
 import rampwright.samples.SampleFiles;
 import rampwright.vehicle.circuit.Circuit;
+import rampwright.vehicle.circuit.Segment.Corner;
+import rampwright.vehicle.circuit.Segment.Straight;
+import rampwright.vehicle.circuit.SegmentLine;
 import rampwright.vehicle.circuit.Station;
 import rampwright.vehicle.file.FileSource;
 import rampwright.vehicle.file.YamlReader;
@@ -25,6 +28,7 @@ final class SampleSheets {
       kit: ../kits/plate_kit.yaml
       circuits:
         - {file: skid pan, weight: 2}
+        - {file: stadium}
       conditions: {grip: 0.95, fuel_mass_kg: 30, wind_speed_mps: 3, wind_from_deg: 90}
       driver: quick
       limits:
@@ -43,7 +47,9 @@ final class SampleSheets {
 
   private SampleSheets() {}
 
-  /** Returns an event on a circle of 30 m radius. */
+  /**
+   * Returns an event on a circle of 30 m radius and on two straights with a hairpin at each end.
+   */
   static Event event() {
     return event(EVENT);
   }
@@ -62,7 +68,22 @@ final class SampleSheets {
       texts.put(path, samples.text(path, YamlReader.LARGEST));
     }
     texts.put("events/e.yaml", text);
-    return EventFile.read(FileSource.texts(texts), "events/e.yaml", (source, path) -> circle(path));
+    return EventFile.read(
+        FileSource.texts(texts),
+        "events/e.yaml",
+        (source, path) -> path.endsWith("stadium") ? stadium() : circle(path));
+  }
+
+  private static Circuit stadium() {
+    return SegmentLine.closed(
+        "stadium",
+        List.of(
+            new Straight(120),
+            Corner.degrees(20, 180, 20),
+            new Straight(120),
+            Corner.degrees(35, 180, 20)),
+        450,
+        5);
   }
 
   private static Circuit circle(String name) {

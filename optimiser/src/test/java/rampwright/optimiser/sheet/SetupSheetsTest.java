@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import rampwright.optimiser.event.Event;
+import rampwright.optimiser.sheet.SetupSheet.CornerEffect;
 import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.lap.LapSolver;
@@ -86,6 +87,18 @@ class SetupSheetsTest {
     assertThat(lap.lapTime()).isEqualTo(solved(event, "harder"));
     assertThat(lap.currentLapTime()).isEqualTo(solved(event, "as raced"));
     assertThat(lap.weight()).isEqualTo(2);
+  }
+
+  @Test
+  void cornersAndTheRestAddUpToTheDifference() {
+    ExpectedLap lap = SHEET.laps().get(1);
+    assertThat(lap.difference()).isNotZero();
+    assertThat(lap.corners()).extracting(CornerEffect::number).containsExactly(1, 2);
+    double corners = lap.corners().stream().mapToDouble(CornerEffect::difference).sum();
+    assertThat(corners + lap.outside()).isCloseTo(lap.difference(), within(1e-9));
+    // the slowest point of a hairpin of 20 m radius at 0.95 of the tyre's friction of about 1.5
+    assertThat(lap.corners().get(0).slowestSpeed()).isBetween(14.0, 19.0);
+    assertThat(lap.corners().get(0).cause()).isNotEmpty();
   }
 
   private static double solved(Event event, String setting) {

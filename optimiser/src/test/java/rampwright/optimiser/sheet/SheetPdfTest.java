@@ -38,9 +38,10 @@ class SheetPdfTest {
         .contains("harder")
         .contains("Event: Club race")
         .contains("Car: Corvane T4")
-        .contains("Circuit: events/skid pan")
+        .contains("Change from “as raced”, now in the car")
         .contains("grip 0.95, fuel 30 kg, air 1.225 kg/m³, wind 3 m/s from 90°")
         .contains("40/80")
+        .contains("events/skid pan 2 9.778 s 9.778 s 0.000 s")
         .contains("NOT turned, stamped 40° / 80°")
         .contains("40° / 80° drive / coast")
         .contains("Friction faces per side 8")
@@ -57,7 +58,8 @@ class SheetPdfTest {
         .contains("Eye protection")
         .contains("licensed")
         .contains("Built by (name, date, signature)")
-        .contains("Unit no.");
+        .contains("Unit no.")
+        .contains("Notes of crew and driver");
   }
 
   @Test
@@ -73,6 +75,7 @@ class SheetPdfTest {
     assertThat(words)
         .contains("setting " + name)
         .contains("circuit 2 " + name)
+        .contains("corner by corner")
         .contains("12 2532 115 −0.012 cornering speed")
         .contains("elsewhere 0.000")
         .contains("licensed")
