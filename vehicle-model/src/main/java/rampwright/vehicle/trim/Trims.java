@@ -47,6 +47,18 @@ public final class Trims {
   }
 
   /**
+   * Returns the trim at constant speed, or empty when there is none on the branch joined to
+   * straight running.
+   */
+  public Optional<Trim> constantSpeed(double speed, double curvature, double curvatureGradient) {
+    if (!stand(speed, curvature, curvatureGradient)) {
+      return Optional.empty();
+    }
+    found.copyFrom(level);
+    return snapshot();
+  }
+
+  /**
    * Returns the trim with a cage torque (N·m) and the brakes off, or empty when there is none on
    * the branch joined to straight running.
    */
