@@ -243,7 +243,7 @@ class EventFileTest {
             "{kind: plate,",
             "{kind: plat,",
             "events/e.yaml:20: settings[4].differentials.rear.kind: The kind (plat) must be one"
-                + " of: open, plate, spool. Maybe you meant plate."),
+                + " of: brake_lock, open, plate, spool, torque_sensing, viscous, viscous_plates, worm_gear. Maybe you meant plate."),
         arguments(
             "oval.csv ",
             "lost.csv ",

@@ -6,34 +6,19 @@ import java.util.Map;
 import rampwright.vehicle.differential.Differential;
 import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.differential.OpenDifferential;
-import rampwright.vehicle.differential.PlateDifferential;
-import rampwright.vehicle.differential.Spool;
 import rampwright.vehicle.driveline.DriveLayout;
 import rampwright.vehicle.input.InvalidInput;
 
 /**
  * Laws of differentials as YAML: the word {@code open} or {@code spool}, or a group with {@code
- * kind} and the law's numbers. A car's set has one law for each position that its layout drives.
+ * kind} ({@code open}, {@code spool}, {@code plate}, {@code viscous}, {@code viscous_plates},
+ * {@code torque_sensing}, {@code worm_gear}, {@code brake_lock}) and the law's numbers. A car's set
+ * has one law for each position that its layout drives.
  */
 public final class DifferentialFile {
-  private static final String KIND = "kind";
-  private static final String OPEN = "open";
-  private static final String SPOOL = "spool";
-  private static final String PLATE = "plate";
-
   private static final String FRONT = "front";
   private static final String CENTRE = "centre";
   private static final String REAR = "rear";
-
-  private static final Fields<OpenDifferential> OPEN_FIELDS =
-      Fields.<OpenDifferential>none()
-          .with(OpenDifferential.FRICTION_SHARE, OpenDifferential::frictionShare, 0);
-
-  private static final Fields<PlateDifferential> PLATE_FIELDS =
-      Fields.<PlateDifferential>none()
-          .with(PlateDifferential.PRELOAD, PlateDifferential::preload)
-          .with(PlateDifferential.DRIVE_SHARE, PlateDifferential::driveShare)
-          .with(PlateDifferential.COAST_SHARE, PlateDifferential::coastShare);
 
   private DifferentialFile() {}
 
@@ -56,7 +41,8 @@ public final class DifferentialFile {
     all.put(CENTRE, set.centre());
     all.put(REAR, set.rear());
     Map<String, Object> out = new LinkedHashMap<>();
-    positions(layout).forEach(position -> out.put(position, write(all.get(position))));
+    positions(layout)
+        .forEach(position -> out.put(position, DifferentialLawFile.write(all.get(position))));
     return out;
   }
 
@@ -69,44 +55,6 @@ public final class DifferentialFile {
   }
 
   private static Differential position(YamlMap map, String position) {
-    return map.find(position).map(DifferentialFile::read).orElse(OpenDifferential.IDEAL);
-  }
-
-  private static Differential read(YamlNode node) {
-    if (!node.isMap()) {
-      return node.choice(Map.of(OPEN, OpenDifferential.IDEAL, SPOOL, new Spool()));
-    }
-    String kind = node.peek(KIND).choice(Map.of(OPEN, OPEN, SPOOL, SPOOL, PLATE, PLATE));
-    return switch (kind) {
-      case OPEN -> {
-        Fields.Numbers n = OPEN_FIELDS.read(node.map(OPEN_FIELDS.keysAnd(KIND)));
-        yield new OpenDifferential(n.of(OpenDifferential.FRICTION_SHARE));
-      }
-      case PLATE -> {
-        Fields.Numbers n = PLATE_FIELDS.read(node.map(PLATE_FIELDS.keysAnd(KIND)));
-        yield new PlateDifferential(
-            n.of(PlateDifferential.PRELOAD),
-            n.of(PlateDifferential.DRIVE_SHARE),
-            n.of(PlateDifferential.COAST_SHARE));
-      }
-      default -> {
-        node.map(List.of(KIND));
-        yield new Spool();
-      }
-    };
-  }
-
-  private static Map<String, Object> write(Differential differential) {
-    Map<String, Object> out = new LinkedHashMap<>();
-    if (differential instanceof OpenDifferential open) {
-      out.put(KIND, OPEN);
-      out.putAll(OPEN_FIELDS.write(open));
-    } else if (differential instanceof PlateDifferential plate) {
-      out.put(KIND, PLATE);
-      out.putAll(PLATE_FIELDS.write(plate));
-    } else {
-      out.put(KIND, SPOOL);
-    }
-    return out;
+    return map.find(position).map(DifferentialLawFile::read).orElse(OpenDifferential.IDEAL);
   }
 }

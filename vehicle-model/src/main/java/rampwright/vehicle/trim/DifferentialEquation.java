@@ -11,15 +11,15 @@ import rampwright.vehicle.differential.Differential;
  * capacity {@code C}, the speed difference {@code dw} and a speed scale {@code w},
  *
  * <pre>
- *   z = Df + max(C, C0) dw/w      |z| &lt;= C: dw = 0      otherwise: Df = C sign(z)
+ *   z = Df + max(C, C0) dw/w      |z| &lt;= C g: dw = 0      otherwise: Df = C g sign(z)
  * </pre>
  *
- * which is the semi-smooth form of the law: any solution has {@code |Df| <= C} and slides in the
- * direction of its friction, whatever weight the speed difference has. With a weight that vanished
- * with the capacity, Newton's method would take every small error of the torques for sticking or
- * sliding the other way; so the weight stays of the order of what the tyres' stiffness gives. The
- * row's sign is chosen so that it rises with the speed of the left output whether sticking or
- * sliding.
+ * with {@code g(dw)} the sliding factor, 1 at {@code dw = 0}. It is the semi-smooth form of the
+ * law: any solution has {@code |Df| <= C} and slides in the direction of its friction, whatever
+ * weight the speed difference has. With a weight that vanished with the capacity, Newton's method
+ * would take every small error of the torques for sticking or sliding the other way; so the weight
+ * stays of the order of what the tyres' stiffness gives. The row's sign is chosen so that it rises
+ * with the speed of the left output whether sticking or sliding.
  */
 final class DifferentialEquation {
   /** How the outputs stand to each other. */
@@ -53,7 +53,11 @@ final class DifferentialEquation {
   /** Largest friction torque difference (N·m). */
   double capacity;
 
-  private double capacitySlope;
+  /** Friction torque difference while sliding (N·m). */
+  private double sliding;
+
+  private double slidingByCage;
+  private double slidingBySpeed;
   private double viscousSlope;
 
   /** Sticking or sliding at the last evaluation. */
@@ -90,7 +94,10 @@ final class DifferentialEquation {
     speedDifference = speedOf.apply(value);
     cageTorque = cageOf.apply(value) + cageByInput * input;
     capacity = law.capacity(cageTorque);
-    capacitySlope = law.capacitySlope(cageTorque);
+    double factor = law.slidingFactor(speedDifference);
+    sliding = capacity * factor;
+    slidingByCage = law.capacitySlope(cageTorque) * factor;
+    slidingBySpeed = capacity * law.slidingFactorSlope(speedDifference);
     viscousSlope = law.viscousSlope(speedDifference);
     double friction = torqueDifference - law.viscousTorque(speedDifference);
     if (capacity == Double.POSITIVE_INFINITY) {
@@ -100,14 +107,13 @@ final class DifferentialEquation {
     } else {
       double weight = Math.max(capacity, LEAST_WEIGHT * torqueScale);
       double z = friction + weight * speedDifference / speedScale;
-      state =
-          z > capacity ? State.LEFT_FASTER : z < -capacity ? State.RIGHT_FASTER : State.STICKING;
+      state = z > sliding ? State.LEFT_FASTER : z < -sliding ? State.RIGHT_FASTER : State.STICKING;
     }
     residual =
         switch (state) {
           case STICKING -> speedDifference / speedScale;
-          case LEFT_FASTER -> (capacity - friction) / torqueScale;
-          case RIGHT_FASTER -> (-capacity - friction) / torqueScale;
+          case LEFT_FASTER -> (sliding - friction) / torqueScale;
+          case RIGHT_FASTER -> (-sliding - friction) / torqueScale;
           case FRICTIONLESS -> -friction / torqueScale;
         };
   }
@@ -122,17 +128,23 @@ final class DifferentialEquation {
     if (state == State.FRICTIONLESS) {
       return -dFriction / torqueScale;
     }
-    double dCapacity = capacitySlope * cageOf.apply(change);
-    return (state == State.LEFT_FASTER ? dCapacity - dFriction : -dCapacity - dFriction)
+    double dSliding = slidingByCage * cageOf.apply(change) + slidingBySpeed * dSpeed;
+    return (state == State.LEFT_FASTER ? dSliding - dFriction : -dSliding - dFriction)
         / torqueScale;
   }
 
-  DifferentialState snapshot() {
+  /**
+   * Returns a copy of the state.
+   *
+   * @param wheelBrakeTorque torque with which the unit brakes wheels (N·m)
+   */
+  DifferentialState snapshot(double wheelBrakeTorque) {
     return new DifferentialState(
         cageTorque,
         Math.abs(torqueDifference),
         Math.abs(speedDifference),
         capacity,
-        state == State.STICKING);
+        state == State.STICKING,
+        wheelBrakeTorque);
   }
 }

@@ -10,14 +10,16 @@ package rampwright.vehicle.trim;
  * @param capacity largest friction torque difference at this cage torque (N·m); infinite for a
  *     spool
  * @param sticking whether the outputs turn together
+ * @param wheelBrakeTorque torque with which the unit brakes the wheel (axle) that slips more (N·m)
  */
 public record DifferentialState(
     double cageTorque,
     double torqueDifference,
     double speedDifference,
     double capacity,
-    boolean sticking) {
-  /** Returns the power turned into heat (W): {@code D * dOmega / 2}. */
+    boolean sticking,
+    double wheelBrakeTorque) {
+  /** Returns the power turned into heat inside the unit (W): {@code D * dOmega / 2}. */
   public double slidingPower() {
     return torqueDifference * speedDifference / 2;
   }

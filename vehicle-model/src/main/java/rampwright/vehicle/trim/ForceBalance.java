@@ -4,6 +4,7 @@ import rampwright.vehicle.Car;
 import rampwright.vehicle.Conditions;
 import rampwright.vehicle.chassis.Chassis;
 import rampwright.vehicle.chassis.WheelLoads;
+import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.tyre.Tyre;
 import rampwright.vehicle.tyre.TyreForces;
 
@@ -17,7 +18,8 @@ import rampwright.vehicle.tyre.TyreForces;
  * the wheel loads) and the four longitudinal slips.
  *
  * <p>Results stand in {@link #value} and, per direction, in {@link #change}: body-axis sums of the
- * tyre forces X, Y (N), yaw moment M (N·m), wheel torques T (N·m) and wheel speeds (rad/s).
+ * tyre forces X, Y (N), yaw moment M (N·m), torques T that the driveline brings to the wheels (N·m)
+ * and wheel speeds (rad/s).
  */
 final class ForceBalance {
   static final int X = 0;
@@ -39,6 +41,7 @@ final class ForceBalance {
   };
   final double[] slipAngle = new double[4];
   final WheelLoads loads;
+  final WheelBrakes wheelBrakes;
 
   private final Tyre[] tyres;
   private final double[] radius;
@@ -73,7 +76,7 @@ final class ForceBalance {
   private final double[] angleByBeta = new double[4];
   private final double[] angleByK = new double[4];
 
-  ForceBalance(Car car, Conditions conditions) {
+  ForceBalance(Car car, Conditions conditions, DifferentialSet differentials) {
     Chassis chassis = car.chassis().withAddedMass(conditions.fuelMass());
     this.mass = chassis.mass();
     this.weight = mass * WheelLoads.GRAVITY;
@@ -94,6 +97,7 @@ final class ForceBalance {
     this.downFrontFactor = dynamicPressure * car.aero().downforceAreaFront();
     this.downRearFactor = dynamicPressure * car.aero().downforceAreaRear();
     this.conditionsGrip = conditions.grip();
+    this.wheelBrakes = new WheelBrakes(car.driveline().layout(), differentials);
   }
 
   /** Moves to a point of the road. */
@@ -194,6 +198,7 @@ final class ForceBalance {
         downFrontFactor * pressureBySpeed,
         downRearFactor * pressure,
         downRearFactor * pressureBySpeed);
+    wheelBrakes.update(slips);
     double sumX = 0;
     double sumY = 0;
     double sumM = 0;
@@ -226,7 +231,7 @@ final class ForceBalance {
       sumX += forceX;
       sumY += forceY;
       sumM += wheelX[i] * forceY - wheelY[i] * forceX;
-      value[TORQUE + i] = f.fx * radius[i];
+      value[TORQUE + i] = f.fx * radius[i] + wheelBrakes.torque(i);
       value[SPEED + i] = v * along[i] * (1 + slip[i]) / radius[i];
     }
     value[X] = sumX;
@@ -286,10 +291,10 @@ final class ForceBalance {
     change[Y] = dY;
     change[M] = wheelX[wheel] * dY - wheelY[wheel] * dX;
     for (int i = 0; i < 4; i++) {
-      change[TORQUE + i] = 0;
+      change[TORQUE + i] = wheelBrakes.bySlip(i, wheel);
       change[SPEED + i] = 0;
     }
-    change[TORQUE + wheel] = f.fxSlip * radius[wheel];
+    change[TORQUE + wheel] += f.fxSlip * radius[wheel];
     change[SPEED + wheel] = speed * along[wheel] / radius[wheel];
   }
 }

@@ -9,7 +9,7 @@ import rampwright.vehicle.chassis.Wheel;
  * TrimSolver#restore} solved last and changes with the next one; {@link #toTrim} takes a copy.
  */
 public final class TrimResults {
-  private static final DifferentialState NONE = new DifferentialState(0, 0, 0, 0, false);
+  private static final DifferentialState NONE = new DifferentialState(0, 0, 0, 0, false, 0);
 
   private final ForceBalance forces;
   private final DrivelineEquations driveline;
@@ -131,7 +131,7 @@ public final class TrimResults {
 
   private DifferentialState snapshot(int position) {
     DifferentialEquation d = at(position);
-    return d == null ? NONE : d.snapshot();
+    return d == null ? NONE : d.snapshot(forces.wheelBrakes.ofPosition(position));
   }
 
   private DifferentialEquation at(int position) {

@@ -51,7 +51,7 @@ public final class TrimSolver {
   public TrimSolver(Car car, Conditions conditions, DifferentialSet differentials) {
     this.car = car;
     this.engineSide = car.driveline();
-    this.forces = new ForceBalance(car, conditions);
+    this.forces = new ForceBalance(car, conditions, differentials);
     this.drive =
         new Equilibrium(forces, DrivelineEquations.driving(car, differentials), engineSide);
     this.brake =
