@@ -46,15 +46,18 @@ final class LapPower {
     return sum;
   }
 
-  /** Sliding power of all differentials: {@code D |dOmega| / 2} each. */
+  /** Sliding power of all differentials. */
   double plates(int i) {
-    return unit(i, Channel.FRONT_TORQUE_DIFFERENCE, Channel.FRONT_SPEED_DIFFERENCE)
-        + unit(i, Channel.CENTRE_TORQUE_DIFFERENCE, Channel.CENTRE_SPEED_DIFFERENCE)
-        + unit(i, Channel.REAR_TORQUE_DIFFERENCE, Channel.REAR_SPEED_DIFFERENCE);
+    return plates(i, UnitPosition.FRONT)
+        + plates(i, UnitPosition.CENTRE)
+        + plates(i, UnitPosition.REAR);
   }
 
-  private double unit(int i, Channel torqueDifference, Channel speedDifference) {
-    return trace.get(torqueDifference, i) * Math.abs(trace.get(speedDifference, i)) / 2;
+  /** Sliding power of one differential: {@code D |dOmega| / 2}. */
+  double plates(int i, UnitPosition unit) {
+    return trace.get(unit.torqueDifference(), i)
+        * Math.abs(trace.get(unit.speedDifference(), i))
+        / 2;
   }
 
   /** Sliding power of both front tyres. */

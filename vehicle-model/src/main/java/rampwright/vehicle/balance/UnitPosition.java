@@ -1,0 +1,33 @@
+package rampwright.vehicle.balance;
+
+import rampwright.vehicle.lap.Channel;
+
+/** Where in the car a differential sits. */
+public enum UnitPosition {
+  FRONT("front axle", Channel.FRONT_TORQUE_DIFFERENCE, Channel.FRONT_SPEED_DIFFERENCE),
+  CENTRE("centre", Channel.CENTRE_TORQUE_DIFFERENCE, Channel.CENTRE_SPEED_DIFFERENCE),
+  REAR("rear axle", Channel.REAR_TORQUE_DIFFERENCE, Channel.REAR_SPEED_DIFFERENCE);
+
+  private final String label;
+  private final Channel torqueDifference;
+  private final Channel speedDifference;
+
+  UnitPosition(String label, Channel torqueDifference, Channel speedDifference) {
+    this.label = label;
+    this.torqueDifference = torqueDifference;
+    this.speedDifference = speedDifference;
+  }
+
+  /** Returns the words for people. */
+  public String label() {
+    return label;
+  }
+
+  Channel torqueDifference() {
+    return torqueDifference;
+  }
+
+  Channel speedDifference() {
+    return speedDifference;
+  }
+}
