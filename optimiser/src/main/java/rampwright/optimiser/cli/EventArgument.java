@@ -1,10 +1,7 @@
 package rampwright.optimiser.cli;
 
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import picocli.CommandLine.Parameters;
 import rampwright.optimiser.event.Event;
@@ -12,14 +9,10 @@ import rampwright.optimiser.event.EventFile;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.samples.SampleFiles;
 import rampwright.vehicle.file.FileSource;
-import rampwright.vehicle.file.Suggestion;
 import rampwright.vehicle.input.InvalidInput;
 
 /** The event that a command works on: a file of the user's or one of the samples. */
 final class EventArgument {
-  private static final String SAMPLE = "sample:";
-  private static final String ENDING = ".yaml";
-
   @Parameters(
       paramLabel = "EVENT.yaml",
       description = {
@@ -34,12 +27,12 @@ final class EventArgument {
    * @throws InvalidInput when one of them breaks a rule
    */
   Event read() {
-    if (event.startsWith(SAMPLE)) {
+    Optional<String> sample = SampleName.find(event, "event");
+    if (sample.isPresent()) {
       ClassLoader loader = SampleFiles.class.getClassLoader();
-      FileSource samples = FileSource.classPath(loader, SampleFiles.BASE);
-      return EventFile.read(samples, sample(event.substring(SAMPLE.length())));
+      return EventFile.read(FileSource.classPath(loader, SampleFiles.BASE), sample.get());
     }
-    Path path = path(event);
+    Path path = UserFile.path(event);
     // the source starts where the path does, so that .. in an event may leave its folder
     Path start = Optional.ofNullable(path.getRoot()).orElse(Path.of(""));
     String within = start.relativize(path).toString().replace('\\', '/');
@@ -51,29 +44,5 @@ final class EventArgument {
     return names.isEmpty()
         ? List.of(event.current())
         : names.stream().distinct().map(event::setting).toList();
-  }
-
-  private static String sample(String name) {
-    Map<String, String> samples = new LinkedHashMap<>();
-    SampleFiles.list("event").forEach(e -> samples.put(stem(e.path()), e.path()));
-    if (!samples.containsKey(name)) {
-      String advice =
-          Suggestion.nearest(name, samples.keySet()).map(n -> "you meant " + n).orElse("");
-      String rule = "one of: " + String.join(", ", samples.keySet());
-      throw InvalidInput.of("sample", name, rule, advice);
-    }
-    return samples.get(name);
-  }
-
-  private static String stem(String path) {
-    return path.substring(path.lastIndexOf('/') + 1, path.length() - ENDING.length());
-  }
-
-  private static Path path(String text) {
-    try {
-      return Path.of(text);
-    } catch (InvalidPathException e) {
-      throw InvalidInput.of("file", text, "a path of this system", "");
-    }
   }
 }

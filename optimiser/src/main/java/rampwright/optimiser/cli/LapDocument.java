@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import rampwright.optimiser.event.Event;
+import rampwright.optimiser.event.NamedSetting;
 import rampwright.vehicle.balance.CornerReport;
 import rampwright.vehicle.balance.LapReport;
 import rampwright.vehicle.balance.PhaseReport;
@@ -42,6 +43,13 @@ final class LapDocument {
   }
 
   private static Map<String, Object> lap(Event event, SolvedLaps laps, LapReport report) {
+    return measures(event, laps.setting(), report)
+        .put("corners", report.corners().stream().map(LapDocument::corner).toList())
+        .map();
+  }
+
+  /** Returns what is said of a whole lap. */
+  static JsonMap measures(Event event, NamedSetting setting, LapReport report) {
     JsonMap out = new JsonMap();
     out.put("lapTimeS", report.lapTime());
     out.put("topSpeedMps", report.topSpeed());
@@ -51,14 +59,13 @@ final class LapDocument {
     out.put("largestInnerSlip", report.peakInnerSlip());
     out.put("plateEnergyJ", report.plateEnergy());
     out.put("largestPlatePowerW", report.peakPlatePower());
-    laps.setting()
+    setting
         .kitSetting()
         .map(fitted -> event.kit().build(fitted).frictionArea() * 1e6)
         .ifPresent(area -> out.put("largestPlatePowerWPerMm2", report.peakPlatePower() / area));
     out.put("tyreWorkFrontJ", report.tyreWorkFront());
     out.put("tyreWorkRearJ", report.tyreWorkRear());
-    out.put("corners", report.corners().stream().map(LapDocument::corner).toList());
-    return out.map();
+    return out;
   }
 
   private static Map<String, Object> corner(CornerReport corner) {

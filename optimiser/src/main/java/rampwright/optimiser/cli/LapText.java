@@ -2,10 +2,8 @@ package rampwright.optimiser.cli;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.ToDoubleFunction;
 import rampwright.optimiser.event.Event;
 import rampwright.vehicle.balance.CornerReport;
-import rampwright.vehicle.balance.LapReport;
 import rampwright.vehicle.balance.Phase;
 import rampwright.vehicle.balance.PhaseReport;
 
@@ -31,37 +29,11 @@ final class LapText {
 
   private static TextTable summary(SolvedLaps laps) {
     TextTable table = new TextTable().row("limits of the", "driver", "car", "");
-    line(table, laps, "lap time", "s", 3, LapReport::lapTime);
-    line(table, laps, "top speed", "km/h", 1, report -> report.topSpeed() * 3.6);
-    line(
-        table,
-        laps,
-        "understeer angle on exits",
-        "deg",
-        2,
-        report -> Math.toDegrees(report.exitUndersteerAngle()));
-    line(table, laps, "slide growth rate on entry", "1/s", 2, LapReport::peakSigmaEntry);
-    line(table, laps, "slide growth rate on exit", "1/s", 2, LapReport::peakSigmaExit);
-    line(table, laps, "slip of the inner wheel", "", 3, LapReport::peakInnerSlip);
-    line(table, laps, "plate energy", "kJ", 1, report -> report.plateEnergy() / 1e3);
-    line(table, laps, "largest plate power", "kW", 2, report -> report.peakPlatePower() / 1e3);
-    line(table, laps, "tyre work front", "kJ", 0, report -> report.tyreWorkFront() / 1e3);
-    line(table, laps, "tyre work rear", "kJ", 0, report -> report.tyreWorkRear() / 1e3);
+    for (LapMeasure measure : LapMeasure.values()) {
+      String driver = measure.shown(laps.driverReport());
+      table.row(measure.label(), driver, measure.shown(laps.carReport()), measure.unit());
+    }
     return table;
-  }
-
-  private static void line(
-      TextTable table,
-      SolvedLaps laps,
-      String label,
-      String unit,
-      int decimals,
-      ToDoubleFunction<LapReport> value) {
-    table.row(
-        label,
-        Shown.number(value.applyAsDouble(laps.driverReport()), decimals),
-        Shown.number(value.applyAsDouble(laps.carReport()), decimals),
-        unit);
   }
 
   private static TextTable corners(SolvedLaps laps) {

@@ -12,7 +12,13 @@ import picocli.CommandLine.Spec;
     name = "rampwright",
     mixinStandardHelpOptions = true,
     versionProvider = ProgramVersion.class,
-    subcommands = {LapCommand.class, TrimCommand.class},
+    subcommands = {
+      LapCommand.class,
+      TrimCommand.class,
+      CompareCommand.class,
+      SheetCommand.class,
+      CircuitCommand.class
+    },
     synopsisSubcommandLabel = "COMMAND",
     description =
         "Finds preload, ramp angles and plate count of a plate-type limited-slip differential.",
@@ -36,6 +42,8 @@ public final class Rampwright implements Runnable {
    * @param arguments the command line
    */
   public static void main(String[] arguments) {
+    // the PDF library's logger would say on standard error that nobody listens to it
+    System.setProperty("slf4j.internal.verbosity", "ERROR");
     // JSON is UTF-8 by its standard, and units like N·m and m/s² are lost in a plain locale
     PrintWriter out = new PrintWriter(System.out, true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);

@@ -18,6 +18,13 @@ final class Shown {
     return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
   }
 
+  /** Returns a number with its sign; one that is shown as zero has none. */
+  static String signed(double value, int decimals) {
+    String text = number(value, decimals);
+    boolean positive = value > 0 && text.matches(".*[1-9].*");
+    return positive ? "+" + text : text;
+  }
+
   /** Returns a speed (m/s) in km/h. */
   static String kmh(double speed) {
     return number(speed * 3.6, 1);

@@ -7,7 +7,6 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.Locale;
-import java.util.Map;
 import java.util.stream.Collectors;
 import rampwright.vehicle.lap.Channel;
 import rampwright.vehicle.lap.Lap;
@@ -15,19 +14,6 @@ import rampwright.vehicle.lap.Trace;
 
 /** A lap's trace as CSV: one column per channel with the unit in its name, one row per station. */
 final class TraceFile {
-  private static final Map<String, String> UNITS =
-      Map.of(
-          "m", "_m",
-          "s", "_s",
-          "m/s", "_mps",
-          "m/s²", "_mps2",
-          "1/m", "_1pm",
-          "1/m²", "_1pm2",
-          "1/s", "_1ps",
-          "rad", "_rad",
-          "rad/s", "_radps",
-          "N·m", "_nm");
-
   private TraceFile() {}
 
   /** Writes a lap's trace into a folder, which is made where it is missing. */
@@ -51,8 +37,7 @@ final class TraceFile {
   }
 
   private static String title(Channel channel) {
-    String suffix = channel.unit().isEmpty() ? "" : UNITS.getOrDefault(channel.unit(), "_n");
-    return channel.name().toLowerCase(Locale.ROOT) + suffix;
+    return channel.name().toLowerCase(Locale.ROOT) + UnitName.inFiles(channel.unit());
   }
 
   private static String row(Lap lap, int station) {

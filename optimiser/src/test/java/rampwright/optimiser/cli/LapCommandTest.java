@@ -16,9 +16,11 @@ class LapCommandTest {
   private static final String EVENT = "sample:kestrelwick";
 
   @Test
-  void theTimesOfCornersAndPhasesAddUpAndTheCarIsNotSlowerThanTheDriver() {
+  void theTimesOfCornersAndPhasesAddUpAndTheCarIsNotSlowerThanTheDriver(@TempDir Path folder)
+      throws IOException {
+    String event = Samples.coarse(folder);
     CommandRun run =
-        CommandRun.of("lap", EVENT, "--setting", "open", "--setting", "firm", "--json");
+        CommandRun.of("lap", event, "--setting", "open", "--setting", "firm", "--json");
     assertThat(run.code()).isZero();
     JsonNode laps = run.json().get("laps");
     assertThat(laps)
@@ -56,14 +58,15 @@ class LapCommandTest {
   @Test
   void aTraceHasEveryStationAndItsUnits(@TempDir Path folder) throws IOException {
     Path traces = folder.resolve("new/traces");
-    CommandRun run = CommandRun.of("lap", EVENT, "--trace", traces.toString(), "--json");
+    String event = Samples.coarse(folder);
+    CommandRun run = CommandRun.of("lap", event, "--trace", traces.toString(), "--json");
     JsonNode lap = run.json().get("laps").get(0);
     assertThat(lap.get("setting").textValue()).isEqualTo("as raced");
     Path file = Path.of(lap.get("traceFile").textValue());
     assertThat(file).isEqualTo(traces.resolve("kestrelwick_as-raced_driver.csv"));
     assertThat(Path.of(lap.get("carLimitsTraceFile").textValue())).exists();
     List<String> lines = Files.readAllLines(file);
-    assertThat(lines).hasSize(1 + 2300 / 2);
+    assertThat(lines).hasSize(1 + 2300 / 5);
     assertThat(lines.get(0))
         .startsWith("distance_m,time_s,speed_mps,curvature_1pm,curvature_gradient_1pm2,ax_mps2,ay_")
         .contains("cage_torque_nm", "sigma_1ps", "fx_fl_n", "slip_angle_rr_rad", "rear_capacity_nm")
@@ -97,7 +100,7 @@ class LapCommandTest {
   @Test
   void aFolderThatCannotBeMadeIsTold(@TempDir Path folder) throws IOException {
     Path taken = Files.writeString(folder.resolve("taken"), "");
-    CommandRun.of("lap", EVENT, "--trace", taken.toString())
+    CommandRun.of("lap", Samples.coarse(folder), "--trace", taken.toString())
         .isBadInput("A file could not be written: " + taken + ".");
   }
 }
