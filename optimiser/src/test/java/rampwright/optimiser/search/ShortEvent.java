@@ -3,7 +3,6 @@ package rampwright.optimiser.search;
 import java.util.List;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.EventFile;
-import rampwright.optimiser.event.LimitedMeasure;
 import rampwright.optimiser.event.SettingLimit;
 import rampwright.optimiser.event.WeightedCircuit;
 import rampwright.samples.SampleFiles;
@@ -22,7 +21,7 @@ final class ShortEvent {
           FileSource.classPath(ShortEvent.class.getClassLoader(), SampleFiles.BASE),
           SampleFiles.MAIN_EVENT);
 
-  private static final Circuit CIRCUIT =
+  static final Circuit RING =
       SegmentLine.closed(
           "Short ring",
           List.of(
@@ -37,6 +36,17 @@ final class ShortEvent {
           900,
           2);
 
+  static final Circuit HAIRPINS =
+      SegmentLine.closed(
+          "Two hairpins",
+          List.of(
+              new Straight(120),
+              Corner.degrees(20, 180, 25),
+              new Straight(120),
+              Corner.degrees(20, 180, 25)),
+          420,
+          2);
+
   private ShortEvent() {}
 
   /** Returns the event without any limit. */
@@ -44,19 +54,22 @@ final class ShortEvent {
     return with(List.of());
   }
 
-  /** Returns the event with limits that rule out the fastest settings. */
-  static Event limited() {
-    return with(
-        List.of(
-            new SettingLimit(LimitedMeasure.PLATE_ENERGY, 2500),
-            new SettingLimit(LimitedMeasure.PRELOAD_MIN, 30)));
+  /** Returns the event with limits, on the ring alone. */
+  static Event with(List<SettingLimit> limits) {
+    return event(limits, List.of(new WeightedCircuit(RING, 1)));
   }
 
-  static Event with(List<SettingLimit> limits) {
+  /** Returns the event on both circuits. */
+  static Event on(List<SettingLimit> limits, double ring, double hairpins) {
+    return event(
+        limits, List.of(new WeightedCircuit(RING, ring), new WeightedCircuit(HAIRPINS, hairpins)));
+  }
+
+  private static Event event(List<SettingLimit> limits, List<WeightedCircuit> circuits) {
     return new Event(
         SAMPLE.name(),
         SAMPLE.car(),
-        List.of(new WeightedCircuit(CIRCUIT, 1)),
+        circuits,
         SAMPLE.kit(),
         SAMPLE.conditions(),
         SAMPLE.driver(),
