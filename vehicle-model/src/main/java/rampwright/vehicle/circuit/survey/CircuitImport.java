@@ -2,17 +2,20 @@ package rampwright.vehicle.circuit.survey;
 
 import java.io.InputStream;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import rampwright.vehicle.circuit.Circuit;
 import rampwright.vehicle.circuit.Station;
 import rampwright.vehicle.input.InvalidInput;
 
 /**
- * Reads a circuit from whatever file holds one. What a CSV file is follows from its columns:
+ * Reads a circuit from whatever file holds one. A name that ends in {@code .gpx} means GPX 1.1,
+ * {@code .geojson} or {@code .json} GeoJSON; what any other file is follows from its columns:
  *
  * <ul>
  *   <li>distance and curvature: stations, taken as they are ({@link StationCsv});
- *   <li>time, speed, and lateral acceleration or yaw rate, optionally position: a logged lap.
+ *   <li>time, speed, and lateral acceleration or yaw rate, optionally position: a logged lap;
+ *   <li>x and y, or latitude and longitude, optionally elevation: a surveyed line.
  * </ul>
  */
 public final class CircuitImport {
@@ -29,6 +32,15 @@ public final class CircuitImport {
   public static ImportedCircuit read(String fileName, InputStream content, ImportOptions options) {
     InputStream limited = new LimitedStream(fileName, content, LimitedStream.LARGEST_FILE);
     try {
+      String name = fileName.toLowerCase(Locale.ROOT);
+      if (name.endsWith(".gpx")) {
+        ImportReport.Draft report = new ImportReport.Draft(fileName, "GPX track");
+        return line(GpxReader.read(fileName, limited, report), options, report);
+      }
+      if (name.endsWith(".geojson") || name.endsWith(".json")) {
+        ImportReport.Draft report = new ImportReport.Draft(fileName, "GeoJSON line");
+        return line(GeoJsonReader.read(fileName, limited), options, report);
+      }
       return csv(CsvTable.read(fileName, limited, options.columns()), options);
     } catch (InvalidInput e) {
       throw e.where().isEmpty() ? e.at(fileName) : e;
@@ -43,7 +55,20 @@ public final class CircuitImport {
       Track track = LoggedLap.read(table, options, report);
       return TrackCircuit.of(name(table), track, options, report);
     }
+    boolean positions = table.has(Column.X) || table.has(Column.LATITUDE);
+    if (positions && !table.has(Column.CURVATURE)) {
+      ImportReport.Draft report = draft(table, "surveyed line");
+      Track track = SurveyedLine.of(LinePoints.of(table, report), options, report);
+      return TrackCircuit.of(name(table), track, options, report);
+    }
     return stations(table);
+  }
+
+  private static ImportedCircuit line(
+      LinePoints.Named line, ImportOptions options, ImportReport.Draft report) {
+    String name = line.name().isBlank() ? FileName.stem(report.file()) : line.name();
+    Track track = SurveyedLine.of(line.points().projected(report), options, report);
+    return TrackCircuit.of(name, track, options, report);
   }
 
   private static ImportReport.Draft draft(CsvTable table, String source) {

@@ -82,7 +82,8 @@ final class TrackCircuit {
               "the positions belong to another lap, or a unit is wrong")
           .at(report.file());
     }
-    report.set(Figure.SPEED_CORRECTION, 100 * (scale - 1));
+    report.set(Figure.DISTANCE_CORRECTION, 100 * (scale - 1));
+    report.set(Figure.LENGTH_BY_POSITION, scale * track.length());
     return track.scaled(scale);
   }
 

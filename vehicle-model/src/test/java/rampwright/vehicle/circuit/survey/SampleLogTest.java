@@ -64,7 +64,7 @@ class SampleLogTest {
 
   @Test
   void theMadeUpErrorsOfTheSensorsAreFound() {
-    assertThat(figure(Figure.SPEED_CORRECTION))
+    assertThat(figure(Figure.DISTANCE_CORRECTION))
         .isCloseTo(-100 * SampleLog.SPEED_ERROR, within(0.15));
     assertThat(figure(Figure.LATERAL_OFFSET)).isCloseTo(SampleLog.LATERAL_OFFSET, within(0.02));
     assertThat(figure(Figure.SPIKES)).isEqualTo(2);
