@@ -84,6 +84,7 @@ public final class TrimCheck {
       WheelState w = t.wheels().get(i);
       driven[i] = w.fx() * planar.radius(i) + (i < 2 ? frontBrake : rearBrake);
     }
+    addWheelBrakes(driven, t);
     DriveLayout layout = planar.car.driveline().layout();
     axle(driven, t, 0, layout != DriveLayout.REAR ? set.front() : null, scale);
     axle(driven, t, 2, layout != DriveLayout.FRONT ? set.rear() : null, scale);
@@ -96,6 +97,31 @@ public final class TrimCheck {
       double difference = 2 * q * rear - 2 * (1 - q) * front;
       double speed = (speed(t, 0) + speed(t, 1) - speed(t, 2) - speed(t, 3)) / 2;
       law(set.centre(), cage, difference, speed, scale, t.centre());
+    }
+  }
+
+  /** What a unit takes from the wheel (axle) that slips more, the driveline must bring as well. */
+  private void addWheelBrakes(double[] driven, Trim t) {
+    DriveLayout layout = planar.car.driveline().layout();
+    double[] s = t.wheels().stream().mapToDouble(WheelState::slip).toArray();
+    if (layout != DriveLayout.REAR) {
+      double brake = set.front().wheelBrakeTorque(Math.max(s[0], s[1]), Math.min(s[0], s[1]));
+      driven[s[0] > s[1] ? 0 : 1] += brake;
+      assertThat(t.axles().get(0).wheelBrakeTorque()).isCloseTo(brake, within(1e-6));
+    }
+    if (layout != DriveLayout.FRONT) {
+      double brake = set.rear().wheelBrakeTorque(Math.max(s[2], s[3]), Math.min(s[2], s[3]));
+      driven[s[2] > s[3] ? 2 : 3] += brake;
+      assertThat(t.axles().get(1).wheelBrakeTorque()).isCloseTo(brake, within(1e-6));
+    }
+    if (layout == DriveLayout.ALL) {
+      double front = (s[0] + s[1]) / 2;
+      double rear = (s[2] + s[3]) / 2;
+      double brake = set.centre().wheelBrakeTorque(Math.max(front, rear), Math.min(front, rear));
+      int axle = front > rear ? 0 : 2;
+      driven[axle] += brake / 2;
+      driven[axle + 1] += brake / 2;
+      assertThat(t.centre().wheelBrakeTorque()).isCloseTo(brake, within(1e-6));
     }
   }
 
@@ -130,7 +156,9 @@ public final class TrimCheck {
     } else {
       assertThat(friction)
           .as("sliding at capacity")
-          .isCloseTo(Math.signum(speedDifference) * capacity, within(scale));
+          .isCloseTo(
+              Math.signum(speedDifference) * capacity * law.slidingFactor(speedDifference),
+              within(scale));
     }
     assertThat(told.torqueDifference()).isCloseTo(Math.abs(difference), within(scale));
     assertThat(told.speedDifference()).isCloseTo(Math.abs(speedDifference), within(1e-6));
