@@ -27,14 +27,14 @@ final class SampleLaps {
   }
 
   static Lap fast(Differential rear) {
-    return lap(SampleCircuits.fast(), rear);
+    return lap(SampleCircuits.fast(), rear, SPACING);
   }
 
   static Lap slow(Differential rear) {
-    return lap(SampleCircuits.slow(), rear);
+    return lap(SampleCircuits.slow(), rear, SPACING);
   }
 
-  static Lap lap(Circuit circuit, Differential rear) {
+  static Lap lap(Circuit circuit, Differential rear, double spacing) {
     return LapSolver.solve(
         new LapRequest(
             car(),
@@ -43,6 +43,6 @@ final class SampleLaps {
             Driver.QUICK,
             LimitForm.DRIVER,
             circuit,
-            SPACING));
+            spacing));
   }
 }
