@@ -27,14 +27,14 @@ final class SampleLaps {
   }
 
   static Lap fast(Differential rear) {
-    return lap(SampleCircuits.fast(), rear, SPACING);
+    return lap(SampleCircuits.fast(), rear);
   }
 
   static Lap slow(Differential rear) {
-    return lap(SampleCircuits.slow(), rear, SPACING);
+    return lap(SampleCircuits.slow(), rear);
   }
 
-  static Lap lap(Circuit circuit, Differential rear, double spacing) {
+  static Lap lap(Circuit circuit, Differential rear) {
     return LapSolver.solve(
         new LapRequest(
             car(),
@@ -43,6 +43,6 @@ final class SampleLaps {
             Driver.QUICK,
             LimitForm.DRIVER,
             circuit,
-            spacing));
+            SPACING));
   }
 }

@@ -9,6 +9,7 @@ import java.util.List;
  */
 public final class Palette {
   private static final List<String> DASHES = List.of("solid", "dashed", "mixed", "dotted");
+  private static final List<String> CSS_DASHES = List.of("solid", "dashed", "double", "dotted");
   private static final List<String> SYMBOLS = List.of("circle", "triangle", "rect", "diamond");
 
   /** Number of settings that can be told apart. */
@@ -19,6 +20,11 @@ public final class Palette {
   /** Returns the colour of a setting, 0 to {@link #SIZE}-1, as a property of the style sheet. */
   public static String colour(int index) {
     return "--rw-line-" + (index + 1);
+  }
+
+  /** Returns the border style that stands for a setting's dash outside a chart. */
+  public static String cssDash(int index) {
+    return CSS_DASHES.get(index);
   }
 
   static String dash(int index) {

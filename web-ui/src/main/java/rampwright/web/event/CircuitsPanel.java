@@ -2,6 +2,7 @@ package rampwright.web.event;
 
 import com.vaadin.flow.component.button.Button;
 import com.vaadin.flow.component.html.Div;
+import com.vaadin.flow.router.RouterLink;
 import java.util.ArrayList;
 import java.util.List;
 import rampwright.optimiser.event.Event;
@@ -25,7 +26,7 @@ final class CircuitsPanel extends Section {
     for (WeightedCircuit weighted : event.circuits()) {
       all.add(circuit(event, weighted, editor));
     }
-    add(all);
+    add(all, new RouterLink("Circuit from a file: logged lap, stations or line", ImportView.class));
   }
 
   private static Div circuit(Event event, WeightedCircuit weighted, EventEditor editor) {

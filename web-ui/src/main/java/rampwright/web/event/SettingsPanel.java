@@ -95,7 +95,7 @@ final class SettingsPanel extends Section {
     return setting.kitSetting().map(s -> words.apply(event.kit().build(s))).orElse("–");
   }
 
-  private static String law(NamedSetting setting, Function<PlateDifferential, String> words) {
+  private String law(NamedSetting setting, Function<PlateDifferential, String> words) {
     return setting.differentials().rear() instanceof PlateDifferential law ? words.apply(law) : "–";
   }
 }

@@ -12,7 +12,8 @@ public final class Tables {
   /** Returns a table without columns that cannot be selected. */
   public static <T> Grid<T> dense() {
     Grid<T> grid = new Grid<>();
-    grid.addThemeVariants(GridVariant.LUMO_COMPACT, GridVariant.LUMO_NO_BORDER);
+    grid.addThemeVariants(
+        GridVariant.LUMO_COMPACT, GridVariant.LUMO_NO_BORDER, GridVariant.LUMO_WRAP_CELL_CONTENT);
     grid.addClassName("rw-table");
     grid.setSelectionMode(Grid.SelectionMode.NONE);
     return grid;

@@ -9,9 +9,14 @@ import java.util.concurrent.Executors;
 import java.util.function.Consumer;
 import java.util.function.DoubleConsumer;
 import org.springframework.stereotype.Service;
+import rampwright.optimiser.event.Event;
+import rampwright.optimiser.event.NamedSetting;
+import rampwright.vehicle.balance.LapAnalysis;
+import rampwright.vehicle.circuit.Circuit;
 import rampwright.vehicle.lap.Lap;
 import rampwright.vehicle.lap.LapRequest;
 import rampwright.vehicle.lap.LapSolver;
+import rampwright.vehicle.lap.LimitForm;
 
 /**
  * Does the work that takes longer than a page may stand still. Equal requests have equal laps, so
@@ -83,6 +88,12 @@ public class Desk {
     Lap solved = LapSolver.solve(request);
     laps.put(request, solved);
     return solved;
+  }
+
+  /** Returns the lap of a setting on a circuit of its event, with its report. Takes time. */
+  public LapStudy study(Event event, NamedSetting setting, Circuit circuit, LimitForm form) {
+    Lap lap = lap(event.lapRequest(setting, circuit, form));
+    return new LapStudy(setting, lap, LapAnalysis.report(lap));
   }
 
   @PreDestroy

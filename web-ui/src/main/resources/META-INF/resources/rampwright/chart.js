@@ -145,7 +145,7 @@ class RampwrightChart extends HTMLElement {
       nameTextStyle: { color: text, fontSize: 11 },
       axisLine: { lineStyle: { color: line }, onZero: false },
       axisTick: { lineStyle: { color: line } },
-      axisLabel: { color: text, fontSize: 11, hideOverlap: true },
+      axisLabel: { color: text, fontSize: 11, hideOverlap: true, formatter: (value) => String(value).replace('-', '−') },
       splitLine: { lineStyle: { color: line, opacity: 0.55 } },
       ...more,
     };
@@ -272,7 +272,7 @@ class RampwrightChart extends HTMLElement {
           silent: true,
           symbolSize: 1,
           data: (spec.labels ?? []).map((label) => ({ value: [label.x, label.y], name: label.text })),
-          label: { show: true, position: 'inside', formatter: (item) => item.name, color: strong, fontSize: 11, fontWeight: 600 },
+          label: { show: true, position: 'inside', formatter: (item) => item.name, color: strong, fontSize: 12, fontWeight: 600, textBorderColor: this.css('--rw-chart-tip'), textBorderWidth: 3 },
         },
         {
           id: 'start',
