@@ -32,10 +32,8 @@ final class CompareDocument {
   }
 
   private static Map<String, Object> setting(Event event, ComparedLap lap) {
-    JsonMap out = new JsonMap().put("setting", lap.setting().name());
-    lap.setting()
-        .kitSetting()
-        .ifPresent(fitted -> out.put("kitSetting", SettingWords.document(event, fitted)));
+    JsonMap out = new JsonMap();
+    SettingWords.put(out, event, lap.setting());
     out.putAll(LapDocument.measures(event, lap.setting(), lap.report()).map());
     out.put("gapS", lap.gap().total());
     out.put("causes", causes(lap.gap()::seconds));

@@ -29,10 +29,7 @@ final class LapDocument {
   private static Map<String, Object> laps(Event event, SolvedLaps laps, Path traces) {
     JsonMap out = new JsonMap();
     out.put("circuit", laps.circuit().name());
-    out.put("setting", laps.setting().name());
-    laps.setting()
-        .kitSetting()
-        .ifPresent(fitted -> out.put("kitSetting", SettingWords.document(event, fitted)));
+    SettingWords.put(out, event, laps.setting());
     out.putAll(lap(event, laps, laps.driverReport()));
     out.put("carLimits", lap(event, laps, laps.carReport()));
     if (traces != null) {

@@ -22,6 +22,11 @@ final class OutputOption {
       description = "Print one JSON document and nothing else; units stand in its names.")
   private boolean json;
 
+  /** Returns whether the answer is a JSON document. */
+  boolean json() {
+    return json;
+  }
+
   /** Prints the answer in the form that was asked for. */
   void print(Supplier<String> text, Supplier<Map<String, Object>> document) {
     PrintWriter out = command.commandLine().getOut();

@@ -15,6 +15,7 @@ import picocli.CommandLine.Spec;
     subcommands = {
       LapCommand.class,
       TrimCommand.class,
+      SearchCommand.class,
       CompareCommand.class,
       SheetCommand.class,
       CircuitCommand.class

@@ -1,30 +1,28 @@
 package rampwright.optimiser.cli;
 
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.kit.KitSetting;
-import rampwright.vehicle.differential.Differential;
-import rampwright.vehicle.differential.OpenDifferential;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.PlateDifferential;
-import rampwright.vehicle.differential.Spool;
+import rampwright.vehicle.driveline.DriveLayout;
+import rampwright.vehicle.file.DifferentialFile;
 
 /** What a setting consists of, in words and as a document. */
 final class SettingWords {
+  private static final String KIND = "kind";
+  private static final String OPEN = "open";
+
   private SettingWords() {}
 
   /** Returns the parts of a kit setting or the laws of one that the kit cannot build. */
   static String text(Event event, NamedSetting setting) {
-    return setting
-        .kitSetting()
-        .map(SettingWords::parts)
-        .orElseGet(
-            () ->
-                Position.driven(event).stream()
-                    .map(p -> p.label() + " " + law(p.of(setting.differentials())))
-                    .collect(Collectors.joining(", ")));
+    return setting.kitSetting().map(SettingWords::parts).orElseGet(() -> laws(event, setting));
   }
 
   /** Returns what the crew fits. */
@@ -38,22 +36,34 @@ final class SettingWords {
         + " N·m";
   }
 
-  private static String law(Differential law) {
-    if (law instanceof OpenDifferential) {
-      return "open";
-    }
-    if (law instanceof Spool) {
-      return "spool";
-    }
-    if (law instanceof PlateDifferential plate) {
-      return "plates with preload "
-          + Shown.number(plate.preload(), 0)
-          + " N·m, drive share "
-          + Shown.number(plate.driveShare(), 3)
-          + ", coast share "
-          + Shown.number(plate.coastShare(), 3);
-    }
-    return law.getClass().getSimpleName();
+  /** Returns the laws of all driven positions in the words of the event's file. */
+  private static String laws(Event event, NamedSetting setting) {
+    DriveLayout layout = event.car().driveline().layout();
+    return DifferentialFile.writeSet(setting.differentials(), layout).entrySet().stream()
+        .map(law -> law.getKey() + " " + law(law.getValue()))
+        .collect(Collectors.joining(", "));
+  }
+
+  private static String law(Object written) {
+    Map<?, ?> law = (Map<?, ?>) written;
+    String kind = String.valueOf(law.get(KIND)).replace('_', ' ');
+    List<String> numbers = new ArrayList<>();
+    law.forEach(
+        (key, value) -> {
+          boolean ideal = value instanceof BigDecimal number && number.signum() == 0;
+          if (!key.equals(KIND) && !(ideal && kind.equals(OPEN))) {
+            numbers.add(key + " " + value);
+          }
+        });
+    return numbers.isEmpty() ? kind : kind + " (" + String.join(", ", numbers) + ")";
+  }
+
+  /** Adds what a setting consists of. */
+  static void put(JsonMap out, Event event, NamedSetting setting) {
+    out.put("setting", setting.name());
+    setting.kitSetting().ifPresent(fitted -> out.put("kitSetting", document(event, fitted)));
+    DriveLayout layout = event.car().driveline().layout();
+    out.put("differentials", DifferentialFile.writeSet(setting.differentials(), layout));
   }
 
   /** Returns what the crew fits and the law that it gives. */
