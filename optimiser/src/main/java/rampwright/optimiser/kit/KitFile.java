@@ -4,12 +4,16 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import rampwright.optimiser.kit.PartsKit.ChangeTimes;
 import rampwright.optimiser.kit.PartsKit.PreloadRange;
 import rampwright.vehicle.differential.FacePressure;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.PlateHardware;
 import rampwright.vehicle.differential.RingSet;
+import rampwright.vehicle.differential.preload.DiscSpring;
+import rampwright.vehicle.differential.preload.DiscStack;
+import rampwright.vehicle.differential.preload.PreloadSprings;
 import rampwright.vehicle.file.Fields;
 import rampwright.vehicle.file.FileSource;
 import rampwright.vehicle.file.YamlMap;
@@ -20,7 +24,8 @@ import rampwright.vehicle.input.InvalidInput;
 
 /**
  * Parts kits as YAML: {@code name}, {@code hardware}, the list {@code ring_sets}, {@code
- * faces_per_side}, {@code preload} and {@code change_times}.
+ * faces_per_side}, {@code preload}, {@code change_times} and, where they are known, the preload
+ * {@code springs}.
  */
 public final class KitFile {
   private static final String NAME = "name";
@@ -30,6 +35,7 @@ public final class KitFile {
   private static final String REVERSIBLE = "reversible";
   private static final String PRELOAD = "preload";
   private static final String CHANGE_TIMES = "change_times";
+  private static final String SPRINGS = "springs";
 
   private static final Fields<PlateHardware> HARDWARE_FIELDS =
       Fields.<PlateHardware>none()
@@ -56,6 +62,14 @@ public final class KitFile {
           .with(ChangeTimes.FACES, ChangeTimes::faces)
           .with(ChangeTimes.RING_SET, ChangeTimes::ringSet);
 
+  private static final Fields<PreloadSprings> SPRING_FIELDS =
+      Fields.<PreloadSprings>none()
+          .with(DiscSpring.OUTER_DIAMETER, springs -> springs.stack().spring().outerDiameter())
+          .with(DiscSpring.INNER_DIAMETER, springs -> springs.stack().spring().innerDiameter())
+          .with(DiscSpring.THICKNESS, springs -> springs.stack().spring().thickness())
+          .with(DiscSpring.CONE_HEIGHT, springs -> springs.stack().spring().coneHeight())
+          .with(PreloadSprings.ROOM, PreloadSprings::room);
+
   private KitFile() {}
 
   /**
@@ -74,7 +88,8 @@ public final class KitFile {
    */
   public static PartsKit read(YamlNode node) {
     String faces = PlateBuild.FACES_PER_SIDE.key();
-    YamlMap map = node.map(List.of(NAME, HARDWARE, RING_SETS, faces, PRELOAD, CHANGE_TIMES));
+    YamlMap map =
+        node.map(List.of(NAME, HARDWARE, RING_SETS, faces, PRELOAD, CHANGE_TIMES, SPRINGS));
     String name = map.get(NAME).text();
     PlateHardware hardware = hardware(map.get(HARDWARE));
     List<RingSet> ringSets = map.get(RING_SETS).items().stream().map(KitFile::ringSet).toList();
@@ -84,7 +99,9 @@ public final class KitFile {
             .toList();
     PreloadRange preload = preload(map.get(PRELOAD));
     ChangeTimes times = times(map.get(CHANGE_TIMES));
-    return map.place(() -> new PartsKit(name, hardware, ringSets, facesPerSide, preload, times));
+    Optional<PreloadSprings> springs = map.find(SPRINGS).map(KitFile::springs);
+    return map.place(
+        () -> new PartsKit(name, hardware, ringSets, facesPerSide, preload, times, springs));
   }
 
   /** Returns a kit as the text of a file. */
@@ -98,6 +115,7 @@ public final class KitFile {
     out.put(PlateBuild.FACES_PER_SIDE.key(), kit.facesPerSide());
     out.put(PRELOAD, PRELOAD_FIELDS.write(kit.preload()));
     out.put(CHANGE_TIMES, TIME_FIELDS.write(kit.changeTimes()));
+    kit.springs().ifPresent(springs -> out.put(SPRINGS, write(springs)));
     return YamlText.write(out);
   }
 
@@ -107,6 +125,32 @@ public final class KitFile {
     out.putAll(RING_SET_FIELDS.write(set));
     out.put(REVERSIBLE, set.reversible());
     return out;
+  }
+
+  private static Map<String, Object> write(PreloadSprings springs) {
+    Map<String, Object> out = SPRING_FIELDS.write(springs);
+    out.put(DiscStack.PARALLEL.key(), springs.stack().parallel());
+    out.put(DiscStack.SERIES.key(), springs.stack().series());
+    return out;
+  }
+
+  private static PreloadSprings springs(YamlNode node) {
+    String parallel = DiscStack.PARALLEL.key();
+    String series = DiscStack.SERIES.key();
+    YamlMap map = node.map(SPRING_FIELDS.keysAnd(parallel, series));
+    Fields.Numbers n = SPRING_FIELDS.read(map);
+    return map.place(
+        () ->
+            new PreloadSprings(
+                new DiscStack(
+                    new DiscSpring(
+                        n.of(DiscSpring.OUTER_DIAMETER),
+                        n.of(DiscSpring.INNER_DIAMETER),
+                        n.of(DiscSpring.THICKNESS),
+                        n.of(DiscSpring.CONE_HEIGHT)),
+                    map.get(parallel).wholeNumber(DiscStack.PARALLEL),
+                    map.get(series).wholeNumber(DiscStack.SERIES)),
+                n.of(PreloadSprings.ROOM)));
   }
 
   private static PlateHardware hardware(YamlNode node) {

@@ -2,11 +2,13 @@ package rampwright.optimiser.kit;
 
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.PlateDifferential;
 import rampwright.vehicle.differential.PlateHardware;
 import rampwright.vehicle.differential.RingSet;
+import rampwright.vehicle.differential.preload.PreloadSprings;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.input.Quantity;
 
@@ -19,6 +21,8 @@ import rampwright.vehicle.input.Quantity;
  * @param facesPerSide the numbers of friction faces per side that can be stacked, rising
  * @param preload the preloads that springs and shims give
  * @param changeTimes how long each kind of change takes
+ * @param springs the preload springs of each side, where they are known: then the shims can be
+ *     computed
  */
 public record PartsKit(
     String name,
@@ -26,7 +30,8 @@ public record PartsKit(
     List<RingSet> ringSets,
     List<Integer> facesPerSide,
     PreloadRange preload,
-    ChangeTimes changeTimes) {
+    ChangeTimes changeTimes,
+    Optional<PreloadSprings> springs) {
 
   /**
    * Preloads that can be shimmed.
@@ -141,6 +146,17 @@ public record PartsKit(
             "sort the list");
       }
     }
+  }
+
+  /** Returns a kit whose springs are not known. */
+  public PartsKit(
+      String name,
+      PlateHardware hardware,
+      List<RingSet> ringSets,
+      List<Integer> facesPerSide,
+      PreloadRange preload,
+      ChangeTimes changeTimes) {
+    this(name, hardware, ringSets, facesPerSide, preload, changeTimes, Optional.empty());
   }
 
   /**

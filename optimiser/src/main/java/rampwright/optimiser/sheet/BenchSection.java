@@ -1,6 +1,7 @@
 package rampwright.optimiser.sheet;
 
 import rampwright.optimiser.sheet.BenchCheck.Target;
+import rampwright.vehicle.differential.preload.DiscSpring;
 
 /** What the bench must show, with boxes for what it did show. */
 final class BenchSection {
@@ -21,7 +22,9 @@ final class BenchSection {
     row("Propshaft FREE, one wheel held, turn the other", bench.wheelHeld());
     row("Propshaft LOCKED, one wheel free, turn the other forwards", bench.lockedForwards());
     row("Propshaft LOCKED, one wheel free, turn the other backwards", bench.lockedBackwards());
-    html.raw("</table>").element("p", "class='small'", explanation()).raw("<table><tr>");
+    html.raw("</table>").element("p", "class='small'", explanation());
+    shims();
+    html.raw("<table><tr>");
     for (String measured : new String[] {"Stack height L / R, mm", "Shims L / R, mm", "Oil"}) {
       html.raw("<td class='fill' style='height:2.3em'>")
           .element("span", "class='small'", measured)
@@ -48,6 +51,50 @@ final class BenchSection {
     return Double.isInfinite(target.high())
         ? Shown.brief(target.low(), 1) + " or more"
         : Shown.brief(target.low(), 1) + " – " + Shown.brief(target.high(), 1);
+  }
+
+  private void shims() {
+    if (!sheet.springsKnown()) {
+      return;
+    }
+    html.raw("<p>");
+    if (sheet.shims().isEmpty()) {
+      html.element("b", "", "The kit's springs do not give this preload")
+          .words(" with this number of faces: fit other springs and check on the bench.");
+    } else {
+      shims(sheet.shims().get());
+    }
+    html.raw("</p>");
+  }
+
+  private void shims(Shims shims) {
+    DiscSpring spring = shims.stack().spring();
+    html.element("b", "", "Shims " + shims.millimetres() + " mm on each side")
+        .words(
+            " to start with (0.05 mm more gives "
+                + Shown.signed(shims.rate() * 0.05e-3, 1)
+                + " N·m of P). Disc springs "
+                + shims.stack().parallel()
+                + " parallel × "
+                + shims.stack().series()
+                + " in series, "
+                + millimetres(spring.outerDiameter())
+                + " × "
+                + millimetres(spring.innerDiameter())
+                + " × "
+                + millimetres(spring.thickness())
+                + ", cone height "
+                + millimetres(spring.coneHeight())
+                + " mm, pressed "
+                + Shown.number(shims.deflection() * 1e3, 2)
+                + " mm."
+                + (shims.reliable()
+                    ? ""
+                    : " Nearly flat: real springs are stiffer here than computed."));
+  }
+
+  private static String millimetres(double length) {
+    return Shown.brief(length * 1e3, 2);
   }
 
   private String explanation() {

@@ -2,6 +2,7 @@ package rampwright.optimiser.sheet;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.kit.KitSetting;
@@ -41,13 +42,10 @@ public record SettingChange(String from, List<String> steps, OptionalDouble time
 
   private static SettingChange between(PartsKit kit, String from, KitSetting now, KitSetting then) {
     List<String> steps = new ArrayList<>();
-    double time = 0;
     if (!now.ringSet().equals(then.ringSet())) {
       steps.add("Ring set: take out " + now.ringSet() + ", fit " + fitted(kit, then) + ".");
-      time = kit.changeTimes().ringSet();
     } else if (now.turned() != then.turned()) {
       steps.add("Ring set: take out " + now.ringSet() + ", refit it " + facing(then) + ".");
-      time = kit.changeTimes().ringSet();
     }
     if (now.facesPerSide() != then.facesPerSide()) {
       steps.add(
@@ -56,33 +54,38 @@ public record SettingChange(String from, List<String> steps, OptionalDouble time
               + " to "
               + then.facesPerSide()
               + " faces per side, order as drawn.");
-      time = Math.max(time, kit.changeTimes().faces());
     }
     if (now.preload() != then.preload() || now.facesPerSide() != then.facesPerSide()) {
-      steps.add(preload(kit, now, then));
-      time = Math.max(time, kit.changeTimes().preload());
+      steps.add("Preload: " + preload(now, then) + ", " + shims(kit, now, then) + ".");
     }
-    return new SettingChange(from, steps, OptionalDouble.of(time));
+    return new SettingChange(from, steps, OptionalDouble.of(kit.changeTimes().between(now, then)));
   }
 
-  private static String preload(PartsKit kit, KitSetting now, KitSetting then) {
-    String change =
-        now.preload() == then.preload()
-            ? "keep " + Shown.torque(then.preload())
-            : "from " + Shown.brief(now.preload(), 1) + " to " + Shown.torque(then.preload());
+  private static String preload(KitSetting now, KitSetting then) {
+    return now.preload() == then.preload()
+        ? "keep " + Shown.torque(then.preload())
+        : "from " + Shown.brief(now.preload(), 1) + " to " + Shown.torque(then.preload());
+  }
+
+  /** Another number of faces turns the same spring force into another torque. */
+  private static String shims(PartsKit kit, KitSetting now, KitSetting then) {
+    Optional<Shims> before = Shims.of(kit, kit.build(now));
+    Optional<Shims> after = Shims.of(kit, kit.build(then));
+    if (before.isPresent() && after.isPresent()) {
+      String from = before.get().millimetres();
+      String to = after.get().millimetres();
+      return "shims on each side "
+          + (from.equals(to) ? "stay at " + to : "from " + from + " to " + to)
+          + "\u00a0mm, then check on the bench";
+    }
     if (now.facesPerSide() != then.facesPerSide()) {
-      return "Preload: "
-          + change
-          + "; another number of faces needs another spring force, so shim to the bench.";
+      return "another number of faces needs another spring force: shim to the bench";
     }
     double step = kit.preload().step();
-    return "Preload: "
-        + change
-        + ", shims "
+    return "shims "
         + Shown.signed((then.preload() - now.preload()) / step, 0)
         + " × "
-        + Shown.torque(step)
-        + ".";
+        + Shown.torque(step);
   }
 
   private static String fitted(PartsKit kit, KitSetting setting) {

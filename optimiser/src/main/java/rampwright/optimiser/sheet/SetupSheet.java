@@ -20,6 +20,8 @@ import rampwright.vehicle.differential.PlateBuild;
  * @param build the unit as built
  * @param stack order of the plates on each side
  * @param bench what the bench must show
+ * @param springsKnown whether the kit says which springs it has
+ * @param shims shims by those springs; empty when they are unknown or cannot give the preload
  * @param change what is to be changed from the setting that is in the car
  * @param laps expected effect, one for each circuit of the event, in its order
  * @param limits the event's limits and the values of this setting
@@ -35,6 +37,8 @@ public record SetupSheet(
     PlateBuild build,
     PlateStack stack,
     BenchCheck bench,
+    boolean springsKnown,
+    Optional<Shims> shims,
     SettingChange change,
     List<ExpectedLap> laps,
     List<LimitLine> limits,

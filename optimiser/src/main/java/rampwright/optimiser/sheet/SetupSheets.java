@@ -43,6 +43,8 @@ public final class SetupSheets {
         build,
         PlateStack.of(event.kit(), wanted.facesPerSide()),
         BenchCheck.of(build, event.kit().preload().step()),
+        event.kit().springs().isPresent(),
+        Shims.of(event.kit(), build),
         SettingChange.of(event.kit(), event.current(), wanted),
         event.circuits().stream()
             .map(circuit -> LapComparison.of(event, setting, circuit))

@@ -25,9 +25,11 @@ public final class SheetPdf {
   /** Font sizes (pt) and most corners for one circuit, tried in this order. */
   private enum Fit {
     LARGE(8.8, 40),
-    USUAL(7.8, 40),
+    USUAL(8.1, 40),
+    SMALLER(7.4, 40),
     SMALL(6.8, 40),
-    FEW_CORNERS(6.4, 10),
+    SMALLEST(6.2, 40),
+    FEW_CORNERS(6.2, 10),
     NO_CORNERS(5.8, 0);
 
     private final double size;

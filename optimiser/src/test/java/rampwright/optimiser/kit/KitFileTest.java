@@ -38,6 +38,16 @@ class KitFileTest {
     assertThat(KitFile.read(written, "k.yaml")).isEqualTo(kit);
   }
 
+  @Test
+  void theSpringsMayBeLeftOut() {
+    String text = SAMPLES.text(KIT, YamlReader.LARGEST);
+    String without = text.substring(0, text.indexOf("springs:\n  disc"));
+    PartsKit kit = KitFile.read(FileSource.texts(Map.of("k.yaml", without)), "k.yaml");
+    assertThat(kit.springs()).isEmpty();
+    assertThat(KitFile.write(kit)).doesNotContain("springs:");
+    assertThat(KitFile.read(SAMPLES, KIT).springs()).isPresent();
+  }
+
   static Stream<Arguments> faults() {
     return Stream.of(
         arguments(
@@ -69,6 +79,16 @@ class KitFileTest {
             "preload_max_nm: 5",
             "k.yaml:30: preload: The largest preload (5 N·m) must be at least the smallest preload"
                 + " of 10.0 N·m. Maybe the two were swapped."),
+        arguments(
+            "discs_series: 2",
+            "discs_series: 0",
+            "k.yaml:48: springs.discs_series: The disc spring groups in series (0) must be between"
+                + " 1 and 50."),
+        arguments(
+            "disc_inner_diameter_mm: 72",
+            "disc_inner_diameter_mm: 99",
+            "k.yaml:42: springs: The disc inner diameter (99 mm) must be at most 0.9 of the outer"
+                + " diameter of 100.0 mm. Maybe the two were swapped."),
         arguments(
             "face_pressure: uniform_wear ",
             "face_pressure: even ",

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.OptionalDouble;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.EventFile;
+import rampwright.optimiser.kit.PartsKit;
 import rampwright.optimiser.sheet.SetupSheet.CornerEffect;
 import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.optimiser.sheet.SetupSheet.LimitLine;
@@ -52,6 +53,31 @@ final class SampleSheets {
    */
   static Event event() {
     return event(EVENT);
+  }
+
+  /** Returns the event with a kit whose springs are not known. */
+  static Event eventWithoutSprings() {
+    Event event = event();
+    PartsKit kit = event.kit();
+    PartsKit plain =
+        new PartsKit(
+            kit.name(),
+            kit.hardware(),
+            kit.ringSets(),
+            kit.facesPerSide(),
+            kit.preload(),
+            kit.changeTimes());
+    return new Event(
+        event.name(),
+        event.car(),
+        event.circuits(),
+        plain,
+        event.conditions(),
+        event.driver(),
+        event.limits(),
+        event.settings(),
+        event.currentSetting(),
+        event.spacing());
   }
 
   /** Returns the event with another setting in the car. */
@@ -128,6 +154,8 @@ final class SampleSheets {
         plain.build(),
         plain.stack(),
         plain.bench(),
+        plain.springsKnown(),
+        plain.shims(),
         plain.change(),
         laps,
         limits,

@@ -56,9 +56,31 @@ class SetupSheetsTest {
         .containsExactly(
             "Ring set: take out 45/60, fit 40/80 not turned.",
             "Plates: restack both sides from 6 to 8 faces per side, order as drawn.",
-            "Preload: from 60 to 80\u00a0N·m; another number of faces needs another spring force,"
-                + " so shim to the bench.");
+            "Preload: from 60 to 80\u00a0N·m, shims on each side stay at 0.69\u00a0mm, then check on"
+                + " the bench.");
     assertThat(SHEET.change().time()).isEqualTo(OptionalDouble.of(3600));
+  }
+
+  @Test
+  void withoutKnownSpringsTheBenchDecidesTheShims() {
+    Event event = SampleSheets.eventWithoutSprings();
+    SetupSheet sheet = SetupSheets.of(event, event.setting("harder"));
+    assertThat(sheet.shims()).isEmpty();
+    assertThat(sheet.change().steps())
+        .last()
+        .isEqualTo(
+            "Preload: from 60 to 80\u00a0N·m, another number of faces needs another spring force:"
+                + " shim to the bench.");
+  }
+
+  @Test
+  void theShimsPressTheSpringsWithTheForceOfThePreload() {
+    Shims shims = SHEET.shims().orElseThrow();
+    assertThat(shims.stack().force(shims.deflection())).isCloseTo(80 / (2 * PACK), within(1e-6));
+    // sample springs: twice 3.0 + 1.8 mm free height in a room of 10.0 mm
+    assertThat(shims.thickness()).isCloseTo(shims.deflection() + 0.4e-3, within(1e-12));
+    assertThat(shims.rate()).isGreaterThan(0);
+    assertThat(shims.reliable()).isTrue();
   }
 
   @Test

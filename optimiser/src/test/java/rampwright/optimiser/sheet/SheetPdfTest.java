@@ -50,6 +50,8 @@ class SheetPdfTest {
         .contains("one wheel held, turn the other 40 34 – 46")
         .contains("turn the other backwards holds do not force")
         .contains("Ring set: take out 45/60, fit 40/80 not turned.")
+        .contains("mm on each side to start with")
+        .contains("Disc springs 1 parallel × 2 in series, 100 × 72 × 3, cone height 1.8 mm")
         .contains("Time needed: 60 min")
         .contains("preload ≥ 90 N·m 80 N·m BROKEN")
         .contains("coast locking share ≤ 0.2")

@@ -62,7 +62,8 @@ public record DiscSpring(
           INNER_DIAMETER.label(),
           innerDiameter * 1e3,
           "mm",
-          "at most 0.9 of the outer diameter of " + outerDiameter * 1e3 + " mm",
+          String.format(
+              Locale.ROOT, "at most 0.9 of the outer diameter of %.4g mm", outerDiameter * 1e3),
           "the two were swapped");
     }
   }

@@ -47,6 +47,13 @@ public record PreloadSprings(DiscStack stack, double room) {
     return deflection == 0 ? 0 : stack.rate(deflection) * torquePerForce(build);
   }
 
+  /** Returns whether the springs can give a build its preload by adding shims. */
+  public boolean gives(PlateBuild build) {
+    double most = stack.force(stack.risingDeflection());
+    double least = stack.force(deflection(0));
+    return build.preloadForce() >= least && build.preloadForce() <= most;
+  }
+
   /**
    * Returns the thickness of the shims (m) on each side that gives a build its preload.
    *

@@ -193,7 +193,7 @@ class DiscSpringTest {
     assertThatExceptionOfType(InvalidInput.class)
         .isThrownBy(() -> mm(25.4, 50, 2, 1))
         .withMessage(
-            "The disc inner diameter (50 mm) must be at most 0.9 of the outer diameter of 25.4 mm."
+            "The disc inner diameter (50 mm) must be at most 0.9 of the outer diameter of 25.40 mm."
                 + " Maybe the two were swapped.");
   }
 }

@@ -87,6 +87,9 @@ class PreloadSpringsTest {
   void aPreloadBelowTheUnshimmedOneIsRejected() {
     PreloadSprings tight = new PreloadSprings(STACK, 4e-3);
     PlateBuild build = build(6, 10);
+    assertThat(tight.gives(build)).isFalse();
+    assertThat(tight.gives(build(6, 150))).isTrue();
+    assertThat(tight.gives(build(6, 5000))).isFalse();
     double least = 2 * 6 * 0.11 * 0.044 * SPRING.force(0.2e-3);
     assertThatExceptionOfType(InvalidInput.class)
         .isThrownBy(() -> tight.shim(build))
