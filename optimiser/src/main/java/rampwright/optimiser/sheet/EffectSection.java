@@ -134,7 +134,7 @@ final class EffectSection {
               "num",
               line.value().isPresent()
                   ? Shown.of(measure.quantity(), line.value().getAsDouble())
-                  : "not computed")
+                  : "none on this lap")
           .raw("<td>")
           .element("b", "", line.met().map(met -> met ? "met" : "BROKEN").orElse(""))
           .raw("</td></tr>");

@@ -4,10 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.kit.KitSetting;
 import rampwright.optimiser.kit.PartsKit;
+import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.differential.RingSet;
+import rampwright.vehicle.driveline.DriveLayout;
 
 /**
  * What the crew changes from the setting that is in the car.
@@ -24,23 +27,38 @@ public record SettingChange(String from, List<String> steps, OptionalDouble time
   }
 
   /**
-   * Returns the change to a setting of the kit.
+   * Returns the change from the current setting of an event.
    *
-   * @param kit the kit
-   * @param current what is in the car
-   * @param wanted what is to be built
+   * @param event the event
+   * @param setting what is to be built
+   * @param wanted its choice from the kit
    */
-  public static SettingChange of(PartsKit kit, NamedSetting current, KitSetting wanted) {
-    if (current.kitSetting().isEmpty()) {
-      return new SettingChange(
-          current.name(),
-          List.of("Take out the differential that is in the car; fit the kit's unit as drawn."),
-          OptionalDouble.empty());
+  static SettingChange of(Event event, NamedSetting setting, KitSetting wanted) {
+    NamedSetting current = event.current();
+    List<String> steps = new ArrayList<>();
+    OptionalDouble time = OptionalDouble.empty();
+    if (current.kitSetting().isPresent()) {
+      KitSetting now = current.kitSetting().get();
+      steps.addAll(between(event.kit(), now, wanted));
+      time = OptionalDouble.of(event.kit().changeTimes().between(now, wanted));
+    } else {
+      steps.add("Take out the differential that is in the car; fit the kit's unit as drawn.");
     }
-    return between(kit, current.name(), current.kitSetting().get(), wanted);
+    if (othersDiffer(event, setting)) {
+      steps.add("Other axles: their differentials differ too, see the event; time not counted.");
+    }
+    return new SettingChange(current.name(), steps, time);
   }
 
-  private static SettingChange between(PartsKit kit, String from, KitSetting now, KitSetting then) {
+  private static boolean othersDiffer(Event event, NamedSetting setting) {
+    DifferentialSet now = event.current().differentials();
+    DifferentialSet then = setting.differentials();
+    boolean front = event.car().driveline().layout() == DriveLayout.FRONT;
+    return !now.centre().equals(then.centre())
+        || !(front ? now.rear().equals(then.rear()) : now.front().equals(then.front()));
+  }
+
+  private static List<String> between(PartsKit kit, KitSetting now, KitSetting then) {
     List<String> steps = new ArrayList<>();
     if (!now.ringSet().equals(then.ringSet())) {
       steps.add("Ring set: take out " + now.ringSet() + ", fit " + fitted(kit, then) + ".");
@@ -58,7 +76,7 @@ public record SettingChange(String from, List<String> steps, OptionalDouble time
     if (now.preload() != then.preload() || now.facesPerSide() != then.facesPerSide()) {
       steps.add("Preload: " + preload(now, then) + ", " + shims(kit, now, then) + ".");
     }
-    return new SettingChange(from, steps, OptionalDouble.of(kit.changeTimes().between(now, then)));
+    return steps;
   }
 
   private static String preload(KitSetting now, KitSetting then) {

@@ -14,6 +14,7 @@ import rampwright.vehicle.differential.PlateBuild;
  * @param event name of the event
  * @param setting name of the setting to be built
  * @param car name of the car
+ * @param axle where the unit sits: {@code front axle} or {@code rear axle}
  * @param conditions for which the effect was computed
  * @param driver whose limits the laps keep
  * @param kit name of the parts kit
@@ -31,6 +32,7 @@ public record SetupSheet(
     String event,
     String setting,
     String car,
+    String axle,
     Conditions conditions,
     Driver driver,
     String kit,

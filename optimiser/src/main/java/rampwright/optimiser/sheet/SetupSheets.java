@@ -7,8 +7,11 @@ import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.event.SettingLimit;
 import rampwright.optimiser.kit.KitSetting;
+import rampwright.optimiser.search.EvaluatedSetting;
+import rampwright.optimiser.search.SettingEvaluator;
 import rampwright.optimiser.sheet.SetupSheet.LimitLine;
 import rampwright.vehicle.differential.PlateBuild;
+import rampwright.vehicle.driveline.DriveLayout;
 import rampwright.vehicle.input.InvalidInput;
 
 /** Makes the content of setup sheets. */
@@ -31,12 +34,22 @@ public final class SetupSheets {
    * @throws InvalidInput when the setting is none that the kit builds
    */
   public static SetupSheet of(Event event, NamedSetting setting) {
+    return of(event, setting, SettingEvaluator.of(event));
+  }
+
+  /**
+   * Returns the sheet of a setting, with an evaluator of the same event that may know it already.
+   *
+   * @throws InvalidInput when the setting is none that the kit builds
+   */
+  public static SetupSheet of(Event event, NamedSetting setting, SettingEvaluator evaluator) {
     KitSetting wanted = setting.kitSetting().orElseThrow(() -> notBuilt(event, setting));
     PlateBuild build = event.kit().build(wanted);
     return new SetupSheet(
         event.name(),
         setting.name(),
         event.car().name(),
+        event.car().driveline().layout() == DriveLayout.FRONT ? "front axle" : "rear axle",
         event.conditions(),
         event.driver(),
         event.kit().name(),
@@ -45,12 +58,21 @@ public final class SetupSheets {
         BenchCheck.of(build, event.kit().preload().step()),
         event.kit().springs().isPresent(),
         Shims.of(event.kit(), build),
-        SettingChange.of(event.kit(), event.current(), wanted),
+        SettingChange.of(event, setting, wanted),
         event.circuits().stream()
             .map(circuit -> LapComparison.of(event, setting, circuit))
             .toList(),
-        event.limits().stream().map(limit -> line(limit, build)).toList(),
+        limits(event, wanted, evaluator),
         CAUTIONS);
+  }
+
+  private static List<LimitLine> limits(
+      Event event, KitSetting wanted, SettingEvaluator evaluator) {
+    if (event.limits().isEmpty()) {
+      return List.of();
+    }
+    EvaluatedSetting evaluated = evaluator.evaluate(wanted);
+    return event.limits().stream().map(limit -> line(limit, evaluated)).toList();
   }
 
   private static InvalidInput notBuilt(Event event, NamedSetting setting) {
@@ -67,14 +89,9 @@ public final class SetupSheets {
         built.isEmpty() ? "give the event a setting from its kit" : "use one of: " + built);
   }
 
-  private static LimitLine line(SettingLimit limit, PlateBuild build) {
-    OptionalDouble value =
-        switch (limit.measure()) {
-          case PRELOAD_MIN, PRELOAD_MAX -> OptionalDouble.of(build.preload());
-          case DRIVE_SHARE_MAX -> OptionalDouble.of(build.law().driveShare());
-          case COAST_SHARE_MAX -> OptionalDouble.of(build.law().coastShare());
-          default -> OptionalDouble.empty();
-        };
-    return new LimitLine(limit, value);
+  /** A measure that no lap has, and so no value, is possible: a growth rate where no exit is. */
+  private static LimitLine line(SettingLimit limit, EvaluatedSetting evaluated) {
+    Double value = evaluated.measures().get(limit.measure());
+    return new LimitLine(limit, value == null ? OptionalDouble.empty() : OptionalDouble.of(value));
   }
 }

@@ -2,6 +2,7 @@ package rampwright.optimiser.sheet;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import rampwright.vehicle.Conditions;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.RingSet;
@@ -48,10 +49,14 @@ final class SheetHtml {
 
   private void head() {
     page.raw("<table class='head'><tr><td style='width:13mm'>" + mark() + "</td><td>")
-        .element("div", "class='kind'", "SETUP SHEET · PLATE DIFFERENTIAL")
+        .element("div", "class='kind'", kind())
         .element("h1", "", name(sheet.setting()))
         .raw("</td><td style='width:33mm'><div class='box'>&#160;Date</div></td>")
         .raw("<td style='width:33mm'><div class='box'>&#160;Unit no.</div></td></tr></table>");
+  }
+
+  private String kind() {
+    return "SETUP SHEET · PLATE DIFFERENTIAL · " + sheet.axle().toUpperCase(Locale.ROOT);
   }
 
   /** The mark: a ramp under a pin. */

@@ -36,6 +36,7 @@ final class SampleSheets {
         min_preload_nm: 90
         max_drive_share: 0.9
         max_coast_share: 0.2
+        max_plate_energy_kj: 1000
       settings:
         - name: as raced
           kit: {ring_set: 45/60, turned: true, faces_per_side: 6, preload_nm: 60}
@@ -148,6 +149,7 @@ final class SampleSheets {
         "event " + name,
         "setting " + name,
         "car " + name,
+        plain.axle(),
         plain.conditions(),
         plain.driver(),
         "kit " + name,

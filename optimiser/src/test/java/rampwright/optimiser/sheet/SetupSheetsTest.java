@@ -8,13 +8,17 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import rampwright.optimiser.event.Event;
+import rampwright.optimiser.event.WeightedCircuit;
 import rampwright.optimiser.sheet.SetupSheet.CornerEffect;
 import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
+import rampwright.vehicle.balance.LapAnalysis;
 import rampwright.vehicle.input.InvalidInput;
+import rampwright.vehicle.lap.Lap;
 import rampwright.vehicle.lap.LapSolver;
 import rampwright.vehicle.lap.LimitForm;
 
 class SetupSheetsTest {
+  private static final Event EVENT = SampleSheets.event();
   private static final SetupSheet SHEET = SampleSheets.sheet();
 
   // the sample kit by hand: 8 faces, friction 0.11, mean radius (52 + 36)/2 = 44 mm, ramps at 34 mm
@@ -104,10 +108,9 @@ class SetupSheetsTest {
 
   @Test
   void lapTimesAreThoseOfTheSolver() {
-    Event event = SampleSheets.event();
     ExpectedLap lap = SHEET.laps().get(0);
-    assertThat(lap.lapTime()).isEqualTo(solved(event, "harder"));
-    assertThat(lap.currentLapTime()).isEqualTo(solved(event, "as raced"));
+    assertThat(lap.lapTime()).isEqualTo(lap("harder", EVENT.circuits().get(0)).time());
+    assertThat(lap.currentLapTime()).isEqualTo(lap("as raced", EVENT.circuits().get(0)).time());
     assertThat(lap.weight()).isEqualTo(2);
   }
 
@@ -123,22 +126,26 @@ class SetupSheetsTest {
     assertThat(lap.corners().get(0).cause()).isNotEmpty();
   }
 
-  private static double solved(Event event, String setting) {
+  private static Lap lap(String setting, WeightedCircuit circuit) {
     return LapSolver.solve(
-            event.lapRequest(
-                event.setting(setting), event.circuits().get(0).circuit(), LimitForm.DRIVER))
-        .time();
+        EVENT.lapRequest(EVENT.setting(setting), circuit.circuit(), LimitForm.DRIVER));
   }
 
   @Test
-  void limitsOfThePartsAreJudged() {
+  void limitsOfPartsAndLapsAreJudged() {
     assertThat(SHEET.limits())
         .extracting(line -> line.limit().measure().name() + " " + line.met())
         .containsExactly(
             "PRELOAD_MIN " + Optional.of(false),
             "DRIVE_SHARE_MAX " + Optional.of(false),
-            "COAST_SHARE_MAX " + Optional.of(true));
+            "COAST_SHARE_MAX " + Optional.of(true),
+            "PLATE_ENERGY " + Optional.of(true));
     assertThat(SHEET.limits().get(1).value().orElseThrow()).isCloseTo(K_DRIVE, within(1e-12));
+    double energy = 0;
+    for (WeightedCircuit circuit : EVENT.circuits()) {
+      energy = Math.max(energy, LapAnalysis.report(lap("harder", circuit)).plateEnergy());
+    }
+    assertThat(SHEET.limits().get(3).value().orElseThrow()).isEqualTo(energy).isPositive();
   }
 
   @Test

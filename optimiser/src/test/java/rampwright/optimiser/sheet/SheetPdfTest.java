@@ -34,7 +34,7 @@ class SheetPdfTest {
   void everySectionIsOnTheOnePage() throws IOException {
     byte[] pdf = pdf(SampleSheets.sheet());
     assertThat(words(pdf))
-        .contains("SETUP SHEET")
+        .contains("SETUP SHEET · PLATE DIFFERENTIAL · REAR AXLE")
         .contains("harder")
         .contains("Event: Club race")
         .contains("Car: Corvane T4")
