@@ -11,6 +11,9 @@ final class LapPower {
   /** Outputs that differ by less than this (rad/s) turn together within the solver's tolerance. */
   private static final double SAME_SPEED = 1e-4;
 
+  /** Change of acceleration between stations (m/s²) that one limit alone does not explain. */
+  private static final double JUMP = 2;
+
   private final Lap lap;
   private final Trace trace;
   private final boolean closed;
@@ -31,10 +34,26 @@ final class LapPower {
     return closed ? lap.time() - trace.get(Channel.TIME, i) : 0;
   }
 
-  /** Energy (J) of a power from a station to the next by the trapezoidal rule. */
+  /**
+   * Energy (J) of a power from a station to the next: by the trapezoidal rule, or, where the
+   * acceleration jumps, with either station's power for as long as the speed gained says.
+   */
   double energy(int i, IntToDoubleFunction power) {
     int next = i < n - 1 ? i + 1 : closed ? 0 : i;
-    return interval(i) * (power.applyAsDouble(i) + power.applyAsDouble(next)) / 2;
+    double share = shareOfFirst(i, next);
+    return interval(i) * (share * power.applyAsDouble(i) + (1 - share) * power.applyAsDouble(next));
+  }
+
+  private double shareOfFirst(int i, int next) {
+    double from = trace.get(Channel.AX, i);
+    double to = trace.get(Channel.AX, next);
+    if (Math.abs(from - to) < JUMP) {
+      return 0.5;
+    }
+    double start = trace.get(Channel.SPEED, i);
+    double end = trace.get(Channel.SPEED, next);
+    double mean = (end * end - start * start) / (2 * lap.road().spacing());
+    return Math.max(0, Math.min(1, (mean - to) / (from - to)));
   }
 
   /** Energy (J) of a power over the whole lap. */

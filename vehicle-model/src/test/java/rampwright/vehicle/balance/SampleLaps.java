@@ -21,28 +21,41 @@ final class SampleLaps {
   private SampleLaps() {}
 
   static Car car() {
+    return car("touring_car");
+  }
+
+  private static Car car(String name) {
     return CarFile.read(
         FileSource.classPath(SampleLaps.class.getClassLoader(), "rampwright/samples/"),
-        "cars/touring_car.yaml");
+        "cars/" + name + ".yaml");
+  }
+
+  /** A lap of the slow circuit of another sample car with all of its differentials. */
+  static Lap of(String car, DifferentialSet differentials) {
+    return lap(car(car), SampleCircuits.slow(), differentials, 2);
   }
 
   static Lap fast(Differential rear) {
-    return lap(SampleCircuits.fast(), rear);
+    return lap(SampleCircuits.fast(), rear, SPACING);
   }
 
   static Lap slow(Differential rear) {
-    return lap(SampleCircuits.slow(), rear);
+    return lap(SampleCircuits.slow(), rear, SPACING);
   }
 
-  static Lap lap(Circuit circuit, Differential rear) {
+  static Lap lap(Circuit circuit, Differential rear, double spacing) {
+    return lap(car(), circuit, DifferentialSet.rear(rear), spacing);
+  }
+
+  private static Lap lap(Car car, Circuit circuit, DifferentialSet differentials, double spacing) {
     return LapSolver.solve(
         new LapRequest(
-            car(),
-            DifferentialSet.rear(rear),
+            car,
+            differentials,
             Conditions.STANDARD,
             Driver.QUICK,
             LimitForm.DRIVER,
             circuit,
-            SPACING));
+            spacing));
   }
 }
