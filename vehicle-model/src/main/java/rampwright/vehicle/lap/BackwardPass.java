@@ -20,6 +20,7 @@ final class BackwardPass {
   private final LimitForm form;
   private final TrimState level = new TrimState();
   private final TrimState limit = new TrimState();
+  private final TrimState held = new TrimState();
   private int gear;
   private LapLimit reason;
 
@@ -52,7 +53,7 @@ final class BackwardPass {
         reachApex(i, previous);
       }
       double ax = Double.NaN;
-      if (lowered || profile.speed[previous] > profile.speed[i]) {
+      if (lowered || profile.speed[previous] > profile.speed[i] && !slowsEnough(i, previous)) {
         ax = brakeAt(i, profile.speed[i], lowered);
       }
       if (lowered && !Double.isNaN(ax)) {
@@ -86,6 +87,18 @@ final class BackwardPass {
     }
     double reached = Math.sqrt(2 * (energy - 0.5 * ax * distance));
     profile.speed[before] = Math.min(profile.speed[before], reached);
+  }
+
+  /** Whether the car can slow down as the profile asks, which needs no search for the limit. */
+  private boolean slowsEnough(int i, int previous) {
+    double speed = profile.speed[i];
+    double asked =
+        (speed * speed - profile.speed[previous] * profile.speed[previous]) / 2 / road.spacing();
+    solver.place(road, i);
+    profile.load(i, held);
+    held.braking = false;
+    int lowest = gearbox.best(solver.rollingCageSpeed(speed));
+    return solver.masters(held, asked, lowest, growthMax(i, speed), limit);
   }
 
   /** Brake limit at a station; leaves it in {@code limit}. NaN when there is no trim there. */

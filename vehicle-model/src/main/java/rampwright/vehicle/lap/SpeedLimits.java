@@ -17,6 +17,12 @@ final class SpeedLimits {
   /** Share of the expected limit from which a station's search starts. */
   private static final double BELOW = 0.93;
 
+  /** Lateral acceleration (m/s²) at top speed below which a station is straight... */
+  private static final double STRAIGHT = 0.5;
+
+  /** ...and yaw acceleration (rad/s²) below which it is. */
+  private static final double STRAIGHT_YAW = 0.05;
+
   /** Margin over the straight-line top speed for wind, grade and wheel slip. */
   private static final double TOP_SPEED_MARGIN = 1.2;
 
@@ -25,6 +31,7 @@ final class SpeedLimits {
   private final double growthMax;
   private final double topSpeed;
   private final Profile found;
+  private final TrimState straight = new TrimState();
 
   SpeedLimits(LapRequest request, Road road, TrimSolver solver, double growthMax) {
     this.road = road;
@@ -59,6 +66,11 @@ final class SpeedLimits {
     TrimState out = new TrimState();
     boolean haveNear = false;
     for (int i = 0; i < road.size(); i++) {
+      if (isStraight(i)) {
+        leaveFree(i, near);
+        haveNear = false;
+        continue;
+      }
       solver.place(road, i);
       double curvature = Math.abs(road.curvature(i));
       boolean solved =
@@ -86,6 +98,21 @@ final class SpeedLimits {
         found.speed[i] = topSpeed;
       }
     }
+  }
+
+  /** Whether even at top speed a station asks for next to no lateral force or yaw moment. */
+  private boolean isStraight(int i) {
+    double square = topSpeed * topSpeed;
+    return square * Math.abs(road.curvature(i)) < STRAIGHT
+        && square * Math.abs(road.curvatureGradient(i)) < STRAIGHT_YAW;
+  }
+
+  /** Leaves a station without a limit. */
+  private void leaveFree(int i, TrimState near) {
+    near.copyFrom(straight);
+    near.speed = topSpeed;
+    found.save(i, near, 1, LapLimit.CORNERING);
+    solver.forget();
   }
 
   /** Speed from which the search starts, judged from the station before. */

@@ -55,6 +55,20 @@ final class Arc {
     }
   }
 
+  /** Points from one state to another; returns the distance between them. */
+  double pointTo(TrimState from, TrimState to) {
+    double norm = 0;
+    for (int j = 0; j < size; j++) {
+      direction[j] = (unknown(to, j) - unknown(from, j)) / scale(j);
+      norm += direction[j] * direction[j];
+    }
+    norm = Math.sqrt(norm);
+    for (int j = 0; j < size; j++) {
+      direction[j] /= norm;
+    }
+    return norm;
+  }
+
   /** Points along the third unknown alone: solving at distance zero holds it. */
   void pointAlongThird() {
     Arrays.fill(direction, 0);

@@ -12,14 +12,6 @@ final class CornerLimit {
   private static final double LARGEST_STEP = 1.0;
   private static final double SMALLEST_STEP = 1e-4;
   private static final int MOST_STEPS = 200;
-  private static final int MOST_REFINEMENTS = 40;
-  private static final int MOST_FOLLOWING = 8;
-
-  /** Arc length for a first difference quotient. */
-  private static final double PROBE = 0.01;
-
-  /** Largest arc length between the limits of neighbouring points. */
-  private static final double FAR = 1.5;
 
   /**
    * Share of the branch's direction in speed that counts as none: the speed lies below the fold by
@@ -33,6 +25,9 @@ final class CornerLimit {
   private final Stability stability;
   private final BranchStart start;
   private final Arc arc;
+  private final ArcSearch search;
+  private final ArcSearch.Miss rise;
+  private final ArcSearch.Miss growthLeft;
   private final TrimState last = new TrimState();
   private final TrimState next = new TrimState();
 
@@ -41,7 +36,6 @@ final class CornerLimit {
   private final TrimState keptBefore = new TrimState();
   private int known;
   private boolean byDriver;
-  private double slope;
 
   private double growthMax;
 
@@ -50,6 +44,9 @@ final class CornerLimit {
     this.stability = stability;
     this.start = start;
     this.arc = new Arc(true, drive.driveline.activeWheels);
+    this.search = new ArcSearch(drive, arc);
+    this.rise = state -> arc.thirdPart();
+    this.growthLeft = state -> growthMax - growth(state);
   }
 
   /** Forgets the points before: the next one has no neighbour. */
@@ -111,12 +108,11 @@ final class CornerLimit {
       }
     }
     arc.turn();
-    arc.startAt(next);
-    boolean found = reach(byDriver);
+    boolean found = reach();
     if (found && byDriver != atDriversLimit()) {
       byDriver = !byDriver;
-      slope = Double.NaN;
-      found = reach(byDriver) && byDriver == atDriversLimit();
+      search.slope = Double.NaN;
+      found = reach() && byDriver == atDriversLimit();
     }
     if (!found || next.speed > topSpeed || !drive.signAtMeanSlipIs(start.referenceSign, next)) {
       known = 0;
@@ -131,31 +127,10 @@ final class CornerLimit {
     return byDriver ? arc.thirdPart() > 0 : grows(next);
   }
 
-  /** Secant search along the line for the fold of the speed or the driver's growth rate. */
-  private boolean reach(boolean growth) {
-    double distance = arc.distance(next);
-    double previous = Double.NaN;
-    double missBefore = Double.NaN;
-    for (int k = 0; k < MOST_FOLLOWING; k++) {
-      if (!drive.alongArc(next, arc, distance)) {
-        return false;
-      }
-      double miss = growth ? growth(next) - growthMax : arc.thirdPart();
-      if (Math.abs(miss) < (growth ? GROWTH_TOLERANCE : FLAT)) {
-        return true;
-      }
-      if (!Double.isNaN(previous)) {
-        slope = (miss - missBefore) / (distance - previous);
-      }
-      previous = distance;
-      missBefore = miss;
-      distance += Double.isNaN(slope) ? PROBE : -miss / slope;
-      if (!(Math.abs(distance) < FAR)) {
-        return false;
-      }
-      arc.move(next, distance - previous);
-    }
-    return false;
+  private boolean reach() {
+    return byDriver
+        ? search.follow(next, growthLeft, GROWTH_TOLERANCE)
+        : search.follow(next, rise, FLAT);
   }
 
   private boolean keep(double topSpeed, TrimState out) {
@@ -173,7 +148,7 @@ final class CornerLimit {
   /** Follows the branch up from the trim in {@code last}, which ends as the limit. */
   private boolean climb(double topSpeed) {
     known = 0;
-    slope = Double.NaN;
+    search.slope = Double.NaN;
     arc.pointAlongThird();
     arc.startAt(last);
     if (!drive.alongArc(last, arc, 0) || grows(last)) {
@@ -185,14 +160,14 @@ final class CornerLimit {
       arc.startAt(last);
       double growthBefore = last.sigma;
       double risingBefore = arc.thirdPart();
-      boolean solved = advance(step);
-      boolean over = solved && arc.thirdPart() <= 0;
+      next.copyFrom(last);
+      arc.move(next, step);
+      boolean solved = drive.alongArc(next, arc, step);
+      double rising = arc.thirdPart();
       boolean tooFast = solved && grows(next);
-      if (solved && !drive.signAtMeanSlipIs(start.referenceSign, next)) {
-        solved = false;
-      }
-      if (solved && (over || tooFast)) {
-        return settle(step, over, risingBefore, growthBefore);
+      solved = solved && drive.signAtMeanSlipIs(start.referenceSign, next);
+      if (solved && (rising <= 0 || tooFast)) {
+        return settle(risingBefore, rising, growthBefore);
       }
       if (solved) {
         last.copyFrom(next);
@@ -210,65 +185,25 @@ final class CornerLimit {
     return last.speed >= topSpeed;
   }
 
-  private boolean advance(double distance) {
-    next.copyFrom(last);
-    arc.move(next, distance);
-    return drive.alongArc(next, arc, distance);
-  }
-
-  /** Ends the climb at the fold or the driver's limit, within a step of the line. */
-  private boolean settle(double step, boolean over, double rising, double growthBefore) {
-    double end = step;
-    if (over) {
-      end = narrow(0, rising, step, arc.thirdPart(), false);
-      byDriver = false;
-      if (!grows(next)) {
-        last.copyFrom(next);
-        return drive.signAtMeanSlipIs(start.referenceSign, last);
-      }
-    }
+  /** Ends the climb at the fold or the driver's limit, between the last two states. */
+  private boolean settle(double risingBefore, double rising, double growthBefore) {
     byDriver = true;
-    narrow(0, growthBefore - growthMax, end, next.sigma - growthMax, true);
+    if (rising <= 0) {
+      search.narrow(last, risingBefore, next, rising, rise, FLAT, next);
+      byDriver = drive.signAtMeanSlipIs(start.referenceSign, next) && grows(next);
+    }
+    if (byDriver) {
+      search.narrow(
+          last,
+          growthMax - growthBefore,
+          next,
+          growthMax - next.sigma,
+          growthLeft,
+          GROWTH_TOLERANCE,
+          next);
+    }
     last.copyFrom(next);
     return drive.signAtMeanSlipIs(start.referenceSign, last);
-  }
-
-  /**
-   * Illinois search between two distances along the line, at which the miss has opposite signs.
-   *
-   * @return the distance found; the state there is left in {@code next}
-   */
-  private double narrow(double from, double missFrom, double to, double missTo, boolean growth) {
-    double a = from;
-    double missA = missFrom;
-    double b = to;
-    double missB = missTo;
-    double tolerance = growth ? GROWTH_TOLERANCE : FLAT;
-    int side = 0;
-    double at = to;
-    for (int k = 0; k < MOST_REFINEMENTS; k++) {
-      at = k % 5 == 4 ? (a + b) / 2 : a + (b - a) * missA / (missA - missB);
-      if (!advance(at)) {
-        break;
-      }
-      double miss = growth ? growth(next) - growthMax : arc.thirdPart();
-      if (Math.abs(miss) < tolerance || Math.abs(b - a) < 1e-9) {
-        return at;
-      }
-      if (miss * missFrom > 0) {
-        a = at;
-        missA = miss;
-        missB *= side == 1 ? 0.5 : 1;
-        side = 1;
-      } else {
-        b = at;
-        missB = miss;
-        missA *= side == -1 ? 0.5 : 1;
-        side = -1;
-      }
-    }
-    advance(a);
-    return a;
   }
 
   private double growth(TrimState state) {

@@ -30,7 +30,7 @@ final class Equilibrium {
     ARC
   }
 
-  private static final int MOST_ITERATIONS = 30;
+  private static final int MOST_ITERATIONS = 16;
 
   /**
    * Scaled residual from which one more linear correction is exact to working precision: Newton's

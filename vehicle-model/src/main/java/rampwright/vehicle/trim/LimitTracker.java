@@ -2,9 +2,9 @@ package rampwright.vehicle.trim;
 
 /**
  * Follows a drive or brake limit from one point of the road to the next without searching the whole
- * branch again. The limit's kind (torque, tyres, driver) and the pattern of sticking and sliding
- * units must stay the same; whenever they do not, at every {@link #AUDIT}th point of a corner, and
- * whenever a step does not converge, the caller searches the branch with {@link SlipMarch}.
+ * branch again. The limit's kind and the pattern of sticking and sliding units must stay the same;
+ * whenever they do not, at every {@link #AUDIT}th point of a corner, and whenever a step does not
+ * converge, the caller searches the branch with {@link SlipMarch}.
  *
  * <p>A workspace, one instance per thread and per mode.
  */
@@ -15,19 +15,43 @@ final class LimitTracker {
   /** Lateral acceleration (m/s²) below which the branch has no surprises. */
   private static final double STRAIGHT = 1.0;
 
-  /** Change of mean slip (-) for a first difference quotient. */
-  private static final double PROBE = 1e-4;
-
   /** Largest change of mean slip (-) between neighbouring points. */
   private static final double LARGEST_STEP = 0.02;
 
-  private static final int MOST_ITERATIONS = 6;
-  private static final double GROWTH_TOLERANCE = 1e-5;
-  private static final double AX_TOLERANCE = 1e-6;
+  /** Part of the branch's direction that counts as none when a limit's kind is told. */
+  private static final double FLAT = 1e-3;
+
+  /** Change of torque with mean slip (N·m) that counts as none. */
+  private static final double PEAK_SLOPE = 20;
+
+  private static final double PEAK_TOLERANCE = 0.1;
+  private static final double DIRECTION_TOLERANCE = 1e-5;
+  private static final double GROWTH_TOLERANCE = 1e-6;
+
+  /** What makes a state the limit. */
+  private enum Kind {
+    TORQUE,
+    /** The driver's growth rate is reached. */
+    GROWTH,
+    /** The acceleration is extreme. */
+    EXTREME,
+    /** Torque is extreme, while more slip would still gain acceleration. */
+    PEAK,
+    /** The branch turns back in mean slip. */
+    FOLD,
+    /** Anything else, such as a change between sticking and sliding: cannot be followed. */
+    KINK
+  }
 
   private final Equilibrium equilibrium;
   private final Stability stability;
   private final int direction;
+  private final Arc arc;
+  private final ArcSearch search;
+  private final ArcSearch.Miss slipPart;
+  private final ArcSearch.Miss gainPart;
+  private final ArcSearch.Miss torqueRate;
+  private final ArcSearch.Miss growthLeft;
   private final TrimState last = new TrimState();
   private final TrimState before = new TrimState();
   private final TrimState trial = new TrimState();
@@ -35,14 +59,21 @@ final class LimitTracker {
   private int known;
   private int sinceAudit;
   private TrimLimit reason;
+  private Kind kind;
   private int pattern;
-  private double slope;
   private double runawaySlope;
+  private double growthMax;
 
   LimitTracker(Equilibrium equilibrium, Stability stability) {
     this.equilibrium = equilibrium;
     this.stability = stability;
     this.direction = equilibrium.driveline.braking ? -1 : 1;
+    this.arc = new Arc(false, equilibrium.driveline.activeWheels);
+    this.search = new ArcSearch(equilibrium, arc);
+    this.slipPart = state -> arc.meanSlipPart();
+    this.gainPart = state -> arc.thirdPart();
+    this.torqueRate = state -> state.torqueRate;
+    this.growthLeft = state -> growthMax - growth(state);
   }
 
   /** Forgets the points before: the next one has no neighbour. */
@@ -53,28 +84,45 @@ final class LimitTracker {
   /**
    * Takes over a limit that a search of the whole branch has found.
    *
+   * @param largestGrowth largest growth rate that the driver masters (1/s)
    * @param runaway torque slope (N·m) below which a limit of the driver's may lie before a dip
    */
-  void searched(TrimLimit why, TrimState limit, double runaway) {
+  void searched(TrimLimit why, TrimState limit, double largestGrowth, double runaway) {
+    growthMax = largestGrowth;
     runawaySlope = runaway;
-    if (why != reason) {
-      known = 0;
-    }
-    reason = why;
     sinceAudit = 0;
-    slope = Double.NaN;
+    search.slope = Double.NaN;
+    reason = why;
+    Kind now = kindOf(why, limit);
     // the search may have ended on another state
     trial.copyFrom(limit);
-    if (!equilibrium.atMeanSlip(trial, limit.meanSlip)) {
-      known = 0;
-      return;
-    }
-    int now = pattern();
-    if (now != pattern) {
+    boolean usable = now != Kind.KINK && equilibrium.atMeanSlip(trial, limit.meanSlip);
+    int nowPattern = pattern();
+    if (!usable || now != kind || nowPattern != pattern) {
       known = 0;
     }
-    pattern = now;
-    keep(limit);
+    kind = now;
+    pattern = nowPattern;
+    if (usable) {
+      keep(limit);
+    }
+  }
+
+  private Kind kindOf(TrimLimit why, TrimState limit) {
+    if (why == TrimLimit.TORQUE) {
+      return Kind.TORQUE;
+    }
+    if (why == TrimLimit.DRIVER) {
+      return Math.abs(limit.sigma - growthMax) < FLAT ? Kind.GROWTH : Kind.KINK;
+    }
+    arc.pointAlongBranch(limit, 1);
+    if (Math.abs(arc.thirdPart()) < FLAT) {
+      return Kind.EXTREME;
+    }
+    if (Math.abs(arc.meanSlipPart()) < FLAT) {
+      return Kind.FOLD;
+    }
+    return Math.abs(limit.torqueRate) < PEAK_SLOPE ? Kind.PEAK : Kind.KINK;
   }
 
   /**
@@ -83,24 +131,35 @@ final class LimitTracker {
    * @return the limit's kind, or null when the whole branch must be searched
    */
   TrimLimit follow(
-      double speed, SlipMarch.TorqueCap cap, double growthMax, int sign, TrimState out) {
+      double speed, SlipMarch.TorqueCap cap, double largestGrowth, int sign, TrimState out) {
     double lateral = speed * speed * equilibrium.forces.curvature;
     boolean due = sinceAudit >= AUDIT && Math.abs(lateral) > STRAIGHT;
     if (known == 0 || due) {
       return null;
     }
+    growthMax = largestGrowth;
     sinceAudit++;
     predict(speed);
     boolean found =
-        switch (reason) {
-          case TORQUE -> cap.solve(equilibrium, trial) && !grows(growthMax);
-          case DRIVER -> reachGrowth(growthMax) && cap.headroom(trial) >= 0;
-          case TYRES -> reachExtreme() && !grows(growthMax) && cap.headroom(trial) >= 0;
+        switch (kind) {
+          case TORQUE -> cap.solve(equilibrium, trial) && !grows() && onBranch(sign);
+          case GROWTH -> reach(growthLeft, GROWTH_TOLERANCE) && isFirst(sign);
+          case EXTREME ->
+              reach(gainPart, DIRECTION_TOLERANCE)
+                  && !grows()
+                  && joined(sign)
+                  && direction * trial.torqueRate > -PEAK_SLOPE;
+          case PEAK -> reach(torqueRate, PEAK_TOLERANCE) && !grows() && joined(sign) && gainRises();
+          case FOLD ->
+              reach(slipPart, DIRECTION_TOLERANCE)
+                  && !grows()
+                  && gainRises()
+                  && direction * trial.torqueRate * arc.meanSlipPart() >= 0;
+          case KINK -> false;
         };
     boolean steady =
         found
-            && trial.determinantSign == sign
-            && (reason == TrimLimit.TYRES || direction * trial.torqueRate > runawaySlope)
+            && (kind == Kind.TORQUE || cap.headroom(trial) >= 0)
             && Math.abs(trial.meanSlip - last.meanSlip) < LARGEST_STEP
             && pattern() == pattern;
     if (!steady) {
@@ -110,6 +169,29 @@ final class LimitTracker {
     keep(trial);
     out.copyFrom(trial);
     return reason;
+  }
+
+  private boolean reach(ArcSearch.Miss miss, double tolerance) {
+    arc.pointAlongBranch(last, direction);
+    return search.follow(trial, miss, tolerance);
+  }
+
+  private boolean joined(int sign) {
+    return trial.determinantSign == sign;
+  }
+
+  private boolean onBranch(int sign) {
+    return joined(sign) && direction * trial.torqueRate > runawaySlope;
+  }
+
+  /** Whether the growth rate still rises, so that the driver's limit is crossed upwards. */
+  private boolean isFirst(int sign) {
+    return onBranch(sign) && !(search.slope > 0);
+  }
+
+  /** Whether the acceleration gains all the way to the fold. */
+  private boolean gainRises() {
+    return direction * arc.thirdPart() > FLAT;
   }
 
   private void keep(TrimState limit) {
@@ -133,74 +215,14 @@ final class LimitTracker {
     trial.speed = speed;
   }
 
-  private double growth() {
-    stability.evaluate(equilibrium.forces, equilibrium.driveline, trial.speed, trial.sideslip);
-    trial.sigma = stability.sigma;
-    return trial.sigma;
+  private double growth(TrimState state) {
+    stability.evaluate(equilibrium.forces, equilibrium.driveline, state.speed, state.sideslip);
+    state.sigma = stability.sigma;
+    return state.sigma;
   }
 
-  private boolean grows(double growthMax) {
-    return growthMax != Double.POSITIVE_INFINITY && growth() > growthMax;
-  }
-
-  /** Secant search for the mean slip at which the growth rate is the driver's. */
-  private boolean reachGrowth(double growthMax) {
-    double meanSlip = trial.meanSlip;
-    double previousSlip = Double.NaN;
-    double previousExcess = Double.NaN;
-    for (int k = 0; k < MOST_ITERATIONS; k++) {
-      if (!equilibrium.atMeanSlip(trial, meanSlip)) {
-        return false;
-      }
-      double excess = growth() - growthMax;
-      if (Math.abs(excess) < GROWTH_TOLERANCE) {
-        return true;
-      }
-      double next = secant(meanSlip, excess, previousSlip, previousExcess);
-      if (direction * slope <= 0) {
-        return false;
-      }
-      previousSlip = meanSlip;
-      previousExcess = excess;
-      meanSlip = next;
-      trial.predict(trial, meanSlip - previousSlip);
-    }
-    return false;
-  }
-
-  /** Secant search for the mean slip at which the acceleration is extreme. */
-  private boolean reachExtreme() {
-    double meanSlip = trial.meanSlip;
-    double previousSlip = Double.NaN;
-    double previousRate = Double.NaN;
-    for (int k = 0; k < MOST_ITERATIONS; k++) {
-      if (!equilibrium.atMeanSlip(trial, meanSlip)) {
-        return false;
-      }
-      double next = secant(meanSlip, trial.axRate, previousSlip, previousRate);
-      if (Math.abs(trial.axRate * (next - meanSlip)) < AX_TOLERANCE) {
-        return true;
-      }
-      if (direction * slope >= 0) {
-        return false;
-      }
-      previousSlip = meanSlip;
-      previousRate = trial.axRate;
-      meanSlip = next;
-      trial.predict(trial, meanSlip - previousSlip);
-    }
-    return false;
-  }
-
-  /** Next mean slip of a secant search; without a slope from before, a small step to get one. */
-  private double secant(double x, double f, double previousX, double previousF) {
-    if (!Double.isNaN(previousX) && x != previousX) {
-      slope = (f - previousF) / (x - previousX);
-    }
-    if (Double.isNaN(slope)) {
-      return x + PROBE;
-    }
-    return x - f / slope;
+  private boolean grows() {
+    return growthMax != Double.POSITIVE_INFINITY && growth(trial) > growthMax;
   }
 
   private int pattern() {

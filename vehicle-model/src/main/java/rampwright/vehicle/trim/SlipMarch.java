@@ -28,8 +28,15 @@ final class SlipMarch {
   /** The branch is followed to this multiple of the slip at the tyre's peak. */
   private static final double RANGE = 4;
 
-  private static final double SMALLEST_STEP = 1e-5;
+  /** Arc length of a step where the branch does not go on at a given mean slip. */
+  private static final double ARC_STEP = 0.3;
+
+  private static final double SMALLEST_ARC_STEP = 1e-3;
   private static final double RUNAWAY_SLOPE = 0.2;
+  private static final double TORQUE_SLOPE_SCALE = 1e4;
+  private static final double DIRECTION_TOLERANCE = 1e-6;
+  private static final double GROWTH_TOLERANCE = 1e-6;
+  private static final double TORQUE_TOLERANCE = 1e-6;
 
   private final Equilibrium equilibrium;
   private final Stability stability;
@@ -37,12 +44,19 @@ final class SlipMarch {
   private final int direction;
   private final TrimState[] states = new TrimState[MOST_STATES];
   private final TrimState trial = new TrimState();
-  private final TrimState low = new TrimState();
-  private final TrimState high = new TrimState();
+  private final Arc arc;
+  private final ArcSearch search;
+  private final ArcSearch.Miss slipPart;
+  private final ArcSearch.Miss gainPart;
+  private final ArcSearch.Miss growthLeft;
+  private final ArcSearch.Miss torquePart;
+  private final ArcSearch.Miss torqueLeft;
+  private final ArcSearch.Miss torqueMissing;
 
   private int count;
   private int referenceSign;
   private double growthMax;
+  private double torqueWanted;
   private TorqueCap cap;
 
   /** How much torque is left until the engine or the brakes have no more. */
@@ -62,6 +76,15 @@ final class SlipMarch {
     for (int i = 0; i < MOST_STATES; i++) {
       states[i] = new TrimState();
     }
+    this.arc = new Arc(false, equilibrium.driveline.activeWheels);
+    this.search = new ArcSearch(equilibrium, arc);
+    // on the near side of the fold, where derivatives with mean slip still have their sign
+    this.slipPart = state -> direction * arc.meanSlipPart() - 2 * DIRECTION_TOLERANCE;
+    this.gainPart = state -> direction * arc.thirdPart();
+    this.growthLeft = state -> growthMax - growth(state);
+    this.torquePart = this::boundedTorqueSlope;
+    this.torqueLeft = state -> cap.headroom(state);
+    this.torqueMissing = state -> torqueWanted - torque(state);
   }
 
   /**
@@ -118,24 +141,32 @@ final class SlipMarch {
     return direction * s.torqueRate;
   }
 
+  /** Torque slope squeezed between -1 and 1, because it is infinite where the branch turns back. */
+  private double boundedTorqueSlope(TrimState s) {
+    double slope = torqueSlope(s) / TORQUE_SLOPE_SCALE;
+    return slope / (1 + Math.abs(slope));
+  }
+
   private double gain(TrimState s) {
     return braking ? -s.ax : s.ax;
   }
 
-  /** Slope of the gain along the march, in which the mean slip moves away from zero. */
+  /** Part of the branch's direction in acceleration, positive where the gain rises. */
   private double gainSlope(TrimState s) {
-    return direction * (braking ? -s.axRate : s.axRate);
+    arc.pointAlongBranch(s, 1);
+    return arc.thirdPart();
   }
 
-  private boolean grows(TrimState s) {
-    if (growthMax == Double.POSITIVE_INFINITY) {
-      return false;
-    }
+  private double growth(TrimState s) {
     if (Double.isNaN(s.sigma)) {
       stability.evaluate(equilibrium.forces, equilibrium.driveline, s.speed, s.sideslip);
       s.sigma = stability.sigma;
     }
-    return s.sigma > growthMax;
+    return s.sigma;
+  }
+
+  private boolean grows(TrimState s) {
+    return growthMax != Double.POSITIVE_INFINITY && growth(s) > growthMax;
   }
 
   private boolean solveAt(TrimState from, double meanSlip, TrimState to) {
@@ -152,15 +183,30 @@ final class SlipMarch {
     double end = RANGE * peakSlip;
     double firstSlope = torqueSlope(states[0]);
     double mostTorque = torque(states[0]);
+    boolean bySlip = true;
     while (count < MOST_STATES && Math.abs(states[count - 1].meanSlip) < end) {
       TrimState last = states[count - 1];
       TrimState next = states[count];
-      if (!solveAt(last, last.meanSlip + direction * step, next)) {
-        step /= 2;
-        if (step < SMALLEST_STEP) {
+      boolean ends = false;
+      bySlip &= solveAt(last, last.meanSlip + direction * step, next);
+      if (!bySlip) {
+        if (!alongBranch(last, next)) {
           return false;
         }
-        continue;
+        boolean turned = direction * arc.meanSlipPart() <= 0;
+        ends = turned || next.determinantSign != referenceSign;
+        if (turned) {
+          double beyond = direction * arc.meanSlipPart();
+          arc.pointAlongBranch(last, direction);
+          search.narrow(
+              last,
+              direction * arc.meanSlipPart(),
+              next,
+              beyond,
+              slipPart,
+              DIRECTION_TOLERANCE,
+              next);
+        }
       }
       boolean rising = torqueSlope(next) > 0 && torque(next) > mostTorque;
       if (rising && cap.headroom(next) <= 0) {
@@ -169,7 +215,7 @@ final class SlipMarch {
       count++;
       boolean tooFast = rising && grows(next);
       mostTorque = Math.max(mostTorque, torque(next));
-      if (tooFast && torqueSlope(next) >= RUNAWAY_SLOPE * firstSlope || finished(next)) {
+      if (ends || tooFast && torqueSlope(next) >= RUNAWAY_SLOPE * firstSlope || finished(next)) {
         return false;
       }
       if (torqueSlope(next) < 0) {
@@ -180,33 +226,44 @@ final class SlipMarch {
     return false;
   }
 
+  /**
+   * Steps along the branch by arc length, where the next mean slip has no trim nearby: the branch
+   * may turn back in mean slip, which is the end of the road, or only bend sharply. It also ends
+   * where both wheels of an axle pass their peak together and need no longer share its torque
+   * evenly: the determinant changes sign and torque falls.
+   */
+  private boolean alongBranch(TrimState last, TrimState next) {
+    for (double length = ARC_STEP; length > SMALLEST_ARC_STEP; length /= 2) {
+      arc.pointAlongBranch(last, direction);
+      arc.startAt(last);
+      next.copyFrom(last);
+      arc.move(next, length);
+      if (equilibrium.alongArc(next, arc, length)
+          && (direction * arc.meanSlipPart() <= 0
+              || next.determinantSign == referenceSign
+              || torqueSlope(next) < 0)) {
+        return true;
+      }
+    }
+    return false;
+  }
+
   /** Replaces the state beyond the cap by the one at it. */
   private boolean reachCap(TrimState last, TrimState beyond) {
-    low.copyFrom(last);
-    high.copyFrom(beyond);
-    double left = cap.headroom(low);
-    double over = cap.headroom(high);
-    trial.predict(low, (high.meanSlip - low.meanSlip) * left / (left - over));
-    boolean solved = cap.solve(equilibrium, trial) && between(trial.meanSlip);
-    for (int i = 0; !solved && i < 60; i++) {
-      double middle = (low.meanSlip + high.meanSlip) / 2;
-      if (!solveAt(low, middle, trial)) {
-        break;
-      }
-      (cap.headroom(trial) > 0 ? low : high).copyFrom(trial);
-      solved = Math.abs(high.meanSlip - low.meanSlip) < 1e-12;
-    }
-    if (!solved) {
-      trial.copyFrom(low);
+    double left = cap.headroom(last);
+    double over = cap.headroom(beyond);
+    trial.predict(last, (beyond.meanSlip - last.meanSlip) * left / (left - over));
+    if (!cap.solve(equilibrium, trial) || !between(last, trial.meanSlip, beyond)) {
+      search.narrow(last, left, beyond, over, torqueLeft, TORQUE_TOLERANCE, trial);
     }
     grows(trial);
     states[count++].copyFrom(trial);
     return true;
   }
 
-  private boolean between(double meanSlip) {
-    return (meanSlip - low.meanSlip) * direction >= -1e-9
-        && (high.meanSlip - meanSlip) * direction >= -1e-9;
+  private boolean between(TrimState last, double meanSlip, TrimState beyond) {
+    return (meanSlip - last.meanSlip) * direction >= -1e-9
+        && (beyond.meanSlip - meanSlip) * direction >= -1e-9;
   }
 
   /** Whether torque cannot rise again beyond this state. */
@@ -260,7 +317,7 @@ final class SlipMarch {
       out.copyFrom(states[best]);
       return TrimLimit.TORQUE;
     }
-    return extreme(lastSteady, best, out);
+    return extreme(best, out);
   }
 
   /** Whether torque falls after a state and later exceeds what it had reached. */
@@ -277,78 +334,53 @@ final class SlipMarch {
     return false;
   }
 
-  /** The extreme of the acceleration at or after the best steady state. */
-  private TrimLimit extreme(int lastSteady, int best, TrimState out) {
+  /** The extreme of the acceleration next to the best steady state. */
+  private TrimLimit extreme(int best, TrimState out) {
     out.copyFrom(states[best]);
     int next = best + 1;
-    if (best != lastSteady || next >= count || gainSlope(states[best]) <= 0) {
-      // the branch ended, or the acceleration already fell while torque still rose
-      if (best > 0 && gainSlope(states[best]) <= 0) {
-        refineExtreme(states[best - 1], states[best], out);
-      }
-    } else {
+    if (next < count && gainSlope(states[best]) > 0) {
       refineExtreme(states[best], states[next], out);
+    } else if (best > 0 && gainSlope(states[best]) < 0) {
+      refineExtreme(states[best - 1], states[best], out);
     }
-    if (out.sigma > growthMax) {
-      return bisectGrowth(states[best], out, out);
+    if (grows(out)) {
+      return reachGrowth(states[best], out, out);
     }
     return TrimLimit.TYRES;
   }
 
-  /** Illinois search for zero slope of the acceleration between a rising and a falling state. */
+  /**
+   * The first of two points between a state and the next: where the acceleration is extreme, or
+   * where torque is, beyond which a trim is no steady state.
+   */
   private void refineExtreme(TrimState rising, TrimState falling, TrimState out) {
-    low.copyFrom(rising);
-    high.copyFrom(falling);
-    double slopeLow = gainSlope(low);
-    double slopeHigh = gainSlope(high);
-    if (!(slopeLow > 0) || !(slopeHigh < 0)) {
-      keepBetter(rising, falling, out);
-      return;
+    double slopeRising = gainSlope(rising);
+    double slopeFalling = gainSlope(falling);
+    if (slopeRising > 0 && slopeFalling < 0) {
+      search.narrow(
+          rising, slopeRising, falling, slopeFalling, gainPart, DIRECTION_TOLERANCE, trial);
+    } else {
+      trial.copyFrom(gain(rising) >= gain(falling) ? rising : falling);
     }
-    int side = 0;
-    for (int i = 0; i < 40; i++) {
-      double share = slopeLow / (slopeLow - slopeHigh);
-      double meanSlip = low.meanSlip + share * (high.meanSlip - low.meanSlip);
-      if (!solveAt(low, meanSlip, trial)) {
-        break;
-      }
-      double slope = gainSlope(trial);
-      boolean converged =
-          Math.abs(slope * (high.meanSlip - low.meanSlip)) < 1e-6
-              || Math.abs(high.meanSlip - low.meanSlip) < 1e-8;
-      if (slope > 0) {
-        low.copyFrom(trial);
-        slopeLow = slope;
-        slopeHigh *= side == 1 ? 0.5 : 1;
-        side = 1;
-      } else {
-        high.copyFrom(trial);
-        slopeHigh = slope;
-        slopeLow *= side == -1 ? 0.5 : 1;
-        side = -1;
-      }
-      if (converged) {
-        break;
-      }
+    if (torqueSlope(trial) < 0 && torqueSlope(rising) > 0) {
+      double torqueRising = boundedTorqueSlope(rising);
+      double torqueFalling = boundedTorqueSlope(trial);
+      search.narrow(
+          rising, torqueRising, trial, torqueFalling, torquePart, DIRECTION_TOLERANCE, trial);
     }
-    keepBetter(low, high, out);
-  }
-
-  private void keepBetter(TrimState a, TrimState b, TrimState out) {
-    TrimState better = gain(a) >= gain(b) ? a : b;
+    out.copyFrom(gain(trial) >= gain(rising) ? trial : rising);
     // solved once more so that forces and stability belong to the state that is kept
-    if (solveAt(better, better.meanSlip, trial)) {
+    trial.copyFrom(out);
+    if (equilibrium.atMeanSlip(trial, trial.meanSlip)) {
       grows(trial);
       out.copyFrom(trial);
-    } else {
-      out.copyFrom(better);
     }
   }
 
   /** The growth rate first exceeds the driver's at state {@code i}. */
   private TrimLimit crossing(int lastSteady, int i, int best, TrimState out) {
     if (lastSteady == i - 1) {
-      bisectGrowth(states[lastSteady], states[i], out);
+      reachGrowth(states[lastSteady], states[i], out);
     } else {
       land(lastSteady, i, out);
     }
@@ -360,56 +392,36 @@ final class SlipMarch {
 
   /** Between the last steady state and state {@code i} lies a jump. */
   private void land(int lastSteady, int i, TrimState out) {
-    double mostTorque = torque(states[0]);
+    torqueWanted = torque(states[0]);
     for (int j = 1; j < i; j++) {
-      mostTorque = Math.max(mostTorque, torque(states[j]));
+      torqueWanted = Math.max(torqueWanted, torque(states[j]));
     }
-    low.copyFrom(states[i - 1]);
-    high.copyFrom(states[i]);
-    for (int k = 0; k < 50 && Math.abs(high.meanSlip - low.meanSlip) > 1e-9; k++) {
-      if (!solveAt(low, (low.meanSlip + high.meanSlip) / 2, trial)) {
-        break;
-      }
-      (torque(trial) > mostTorque ? high : low).copyFrom(trial);
-    }
-    if (solveAt(high, high.meanSlip, trial) && !grows(trial)) {
-      high.copyFrom(trial);
-      bisectGrowth(high, states[i], out);
+    TrimState before = states[i - 1];
+    search.narrow(
+        before,
+        torqueWanted - torque(before),
+        states[i],
+        torqueWanted - torque(states[i]),
+        torqueMissing,
+        TORQUE_TOLERANCE,
+        trial);
+    if (equilibrium.atMeanSlip(trial, trial.meanSlip) && !grows(trial)) {
+      reachGrowth(trial, states[i], out);
     } else {
       out.copyFrom(states[lastSteady]);
     }
   }
 
-  /** Finds where the growth rate reaches the driver's limit; keeps the side below it. */
-  private TrimLimit bisectGrowth(TrimState below, TrimState above, TrimState out) {
-    low.copyFrom(below);
-    high.copyFrom(above);
-    double excessLow = low.sigma - growthMax;
-    double excessHigh = high.sigma - growthMax;
-    int side = 0;
-    for (int k = 0; k < 60; k++) {
-      double width = Math.abs(high.meanSlip - low.meanSlip);
-      if (width < 1e-10 || excessLow > -1e-7) {
-        break;
-      }
-      double share = k % 3 == 2 ? 0.5 : excessLow / (excessLow - excessHigh);
-      double meanSlip = low.meanSlip + share * (high.meanSlip - low.meanSlip);
-      if (!solveAt(low, meanSlip, trial)) {
-        break;
-      }
-      if (grows(trial)) {
-        high.copyFrom(trial);
-        excessHigh = trial.sigma - growthMax;
-        excessLow *= side == -1 ? 0.5 : 1;
-        side = -1;
-      } else {
-        low.copyFrom(trial);
-        excessLow = trial.sigma - growthMax;
-        excessHigh *= side == 1 ? 0.5 : 1;
-        side = 1;
-      }
-    }
-    out.copyFrom(low);
+  /** Finds where the growth rate reaches the driver's limit. */
+  private TrimLimit reachGrowth(TrimState below, TrimState above, TrimState out) {
+    search.narrow(
+        below,
+        growthMax - below.sigma,
+        above,
+        growthMax - above.sigma,
+        growthLeft,
+        GROWTH_TOLERANCE,
+        out);
     return TrimLimit.DRIVER;
   }
 }

@@ -193,7 +193,7 @@ public final class TrimSolver {
     if (driveMarch.sawDip()) {
       driveTracker.forget();
     } else {
-      driveTracker.searched(searched, out, driveMarch.runawaySlope());
+      driveTracker.searched(searched, out, growthMax, driveMarch.runawaySlope());
     }
     return searched;
   }
@@ -212,7 +212,7 @@ public final class TrimSolver {
     }
     TrimLimit searched = brakeLimit(level, gear, growthMax, out);
     if (out.braking) {
-      brakeTracker.searched(searched, out, brakeMarch.runawaySlope());
+      brakeTracker.searched(searched, out, growthMax, brakeMarch.runawaySlope());
     } else {
       brakeTracker.forget();
     }
@@ -253,14 +253,14 @@ public final class TrimSolver {
     work.predict(from, (torque - from.cageTorque) / from.torqueRate);
     return drive.atTotalTorque(work, torque)
         && work.determinantSign == driveStart.referenceSign
-        && masters(work, growthMax);
+        && masters(work, drive, growthMax);
   }
 
-  private boolean masters(TrimState state, double growthMax) {
+  private boolean masters(TrimState state, Equilibrium equilibrium, double growthMax) {
     if (growthMax == Double.POSITIVE_INFINITY) {
       return true;
     }
-    stability.evaluate(forces, drive.driveline, state.speed, state.sideslip);
+    stability.evaluate(forces, equilibrium.driveline, state.speed, state.sideslip);
     state.sigma = stability.sigma;
     return state.sigma <= growthMax;
   }
@@ -341,6 +341,22 @@ public final class TrimSolver {
     return brake.atTotalTorque(out, overrun)
         && brake.atAcceleration(out, ax)
         && out.brakeTorque >= 0;
+  }
+
+  /**
+   * Returns whether the driver masters a trim with a path acceleration, with throttle or brakes.
+   *
+   * @param near trim with the brakes off at the same speed
+   * @param out receives the trim
+   */
+  public boolean masters(TrimState near, double ax, int gear, double growthMax, TrimState out) {
+    if (!atAcceleration(near, ax, gear, out) || out.brakeTorque > car.brakes().maxTorque()) {
+      return false;
+    }
+    if (out.braking && out.determinantSign != brakeSign) {
+      return false;
+    }
+    return masters(out, out.braking ? brake : drive, growthMax);
   }
 
   private boolean throttleGives(double ax, double overrun, TrimState out) {
