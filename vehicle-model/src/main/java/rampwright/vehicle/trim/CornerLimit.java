@@ -20,6 +20,10 @@ final class CornerLimit {
   private static final double FLAT = 1e-5;
 
   private static final double GROWTH_TOLERANCE = 1e-6;
+  private static final double SPEED_TOLERANCE = 1e-7;
+
+  /** Share of the speed at a fold below which a dip is not followed. */
+  private static final double DIP = 0.8;
 
   private final Equilibrium drive;
   private final Stability stability;
@@ -28,8 +32,10 @@ final class CornerLimit {
   private final ArcSearch search;
   private final ArcSearch.Miss rise;
   private final ArcSearch.Miss growthLeft;
+  private final ArcSearch.Miss speedMissing;
   private final TrimState last = new TrimState();
   private final TrimState next = new TrimState();
+  private final TrimState fold = new TrimState();
 
   // limits of the points before
   private final TrimState kept = new TrimState();
@@ -47,6 +53,7 @@ final class CornerLimit {
     this.search = new ArcSearch(drive, arc);
     this.rise = state -> arc.thirdPart();
     this.growthLeft = state -> growthMax - growth(state);
+    this.speedMissing = state -> fold.speed - state.speed;
   }
 
   /** Forgets the points before: the next one has no neighbour. */
@@ -119,6 +126,9 @@ final class CornerLimit {
       return false;
     }
     last.copyFrom(next);
+    if (!byDriver) {
+      crossDip(topSpeed);
+    }
     return keep(topSpeed, out);
   }
 
@@ -154,19 +164,20 @@ final class CornerLimit {
     if (!drive.alongArc(last, arc, 0) || grows(last)) {
       return false;
     }
+    return rise(topSpeed) && (last.speed >= topSpeed || byDriver || crossDip(topSpeed));
+  }
+
+  /** Follows the branch up to the first fold of the speed or the driver's limit. */
+  private boolean rise(double topSpeed) {
     double step = FIRST_STEP;
     for (int k = 0; k < MOST_STEPS && last.speed < topSpeed; k++) {
       arc.turn();
       arc.startAt(last);
       double growthBefore = last.sigma;
       double risingBefore = arc.thirdPart();
-      next.copyFrom(last);
-      arc.move(next, step);
-      boolean solved = drive.alongArc(next, arc, step);
+      boolean solved = advance(step);
       double rising = arc.thirdPart();
-      boolean tooFast = solved && grows(next);
-      solved = solved && drive.signAtMeanSlipIs(start.referenceSign, next);
-      if (solved && (rising <= 0 || tooFast)) {
+      if (solved && (rising <= 0 || grows(next))) {
         return settle(risingBefore, rising, growthBefore);
       }
       if (solved) {
@@ -185,6 +196,13 @@ final class CornerLimit {
     return last.speed >= topSpeed;
   }
 
+  /** Steps along the line from the last state to the next. */
+  private boolean advance(double step) {
+    next.copyFrom(last);
+    arc.move(next, step);
+    return drive.alongArc(next, arc, step) && drive.signAtMeanSlipIs(start.referenceSign, next);
+  }
+
   /** Ends the climb at the fold or the driver's limit, between the last two states. */
   private boolean settle(double risingBefore, double rising, double growthBefore) {
     byDriver = true;
@@ -197,13 +215,78 @@ final class CornerLimit {
           last,
           growthMax - growthBefore,
           next,
-          growthMax - next.sigma,
+          growthMax - growth(next),
           growthLeft,
           GROWTH_TOLERANCE,
           next);
     }
     last.copyFrom(next);
     return drive.signAtMeanSlipIs(start.referenceSign, last);
+  }
+
+  /**
+   * Looks beyond a fold at which the inside wheel is past its peak and the differential slides: the
+   * wheel's speed climbs to the outside wheel's, the unit sticks, and the speed may rise again, as
+   * torque does in {@link SlipMarch}. The fold stays the limit when it does not.
+   */
+  private boolean crossDip(double topSpeed) {
+    if (!mayStick()) {
+      return true;
+    }
+    fold.copyFrom(last);
+    double range = SlipMarch.RANGE * drive.peakSlip();
+    double step = FIRST_STEP;
+    for (int k = 0; k < MOST_STEPS && step > SMALLEST_STEP; k++) {
+      arc.turn();
+      arc.startAt(last);
+      if (!advance(step)) {
+        arc.restoreTangent();
+        step /= 2;
+        continue;
+      }
+      if (next.meanSlip > range || next.speed < DIP * fold.speed) {
+        break;
+      }
+      if (next.speed > fold.speed && arc.thirdPart() > 0) {
+        return land(topSpeed);
+      }
+      last.copyFrom(next);
+      step = Math.min(LARGEST_STEP, step * 1.5);
+    }
+    last.copyFrom(fold);
+    return true;
+  }
+
+  /** The car jumps to where the branch has risen to the fold's speed again and goes on there. */
+  private boolean land(double topSpeed) {
+    search.narrow(
+        last,
+        fold.speed - last.speed,
+        next,
+        fold.speed - next.speed,
+        speedMissing,
+        SPEED_TOLERANCE,
+        last);
+    boolean masters = !grows(last) && rise(topSpeed) && last.speed > fold.speed;
+    if (!masters) {
+      last.copyFrom(fold);
+      byDriver = false;
+    }
+    return true;
+  }
+
+  /** Whether an inside wheel spins up at the fold: more slip gives it hardly any more force. */
+  private boolean mayStick() {
+    drive.signAtMeanSlipIs(start.referenceSign, last);
+    for (DifferentialEquation differential : drive.driveline.differentials) {
+      boolean slides =
+          differential.state == DifferentialEquation.State.LEFT_FASTER
+              || differential.state == DifferentialEquation.State.RIGHT_FASTER;
+      if (slides && drive.someWheelSpent()) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private double growth(TrimState state) {

@@ -41,6 +41,9 @@ final class Equilibrium {
   /** Scaled residual beyond which no iteration is tried. */
   private static final double HOPELESS = 1e6;
 
+  /** Longitudinal stiffness over load below which a wheel counts as past its peak. */
+  private static final double SPENT = 3;
+
   private static final double LARGEST_ANGLE_STEP = 0.12;
   private static final double LARGEST_SLIP_STEP = 0.08;
 
@@ -280,6 +283,21 @@ final class Equilibrium {
     boolean solved = atMeanSlip(state, meanSlip(state));
     state.sigma = sigma;
     return solved && state.determinantSign == sign;
+  }
+
+  /** Whether a wheel of those that the engine or the brakes turn gains next to nothing by slip. */
+  boolean someWheelSpent() {
+    for (int i : driveline.activeWheels) {
+      if (forces.tyre[i].fxSlip < SPENT * forces.loads.load(i)) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  /** Returns the slip at the peak of an active wheel's tyre at a quarter of the car's weight. */
+  double peakSlip() {
+    return forces.tyreModel(driveline.activeWheels[0]).slipAtPeak(forces.weight / 4);
   }
 
   private double meanSlip(TrimState state) {

@@ -1,7 +1,5 @@
 package rampwright.vehicle.trim;
 
-import rampwright.vehicle.tyre.Tyre;
-
 /**
  * Finds the drive or brake limit by following the branch of trims in the mean slip of the active
  * wheels, a parameter that does not fold where torque does.
@@ -26,7 +24,7 @@ final class SlipMarch {
   private static final double GROWTH = 1.4;
 
   /** The branch is followed to this multiple of the slip at the tyre's peak. */
-  private static final double RANGE = 4;
+  static final double RANGE = 4;
 
   /** Arc length of a step where the branch does not go on at a given mean slip. */
   private static final double ARC_STEP = 0.3;
@@ -176,8 +174,7 @@ final class SlipMarch {
 
   /** Follows the branch; returns whether it ended at the torque cap. */
   private boolean march() {
-    Tyre tyre = equilibrium.forces.tyreModel(braking ? 0 : equilibrium.driveline.activeWheels[0]);
-    double peakSlip = tyre.slipAtPeak(equilibrium.forces.weight / 4);
+    double peakSlip = equilibrium.peakSlip();
     double step = STEP * peakSlip;
     double largestStep = step;
     double end = RANGE * peakSlip;
