@@ -101,7 +101,10 @@ final class TraceWriter {
     if (!solver.atAcceleration(level, ax, gear, state) || !solver.restore(state)) {
       // at the very limit of speed there is no acceleration to give
       state.copyFrom(level);
-      if (!solver.restore(state)) {
+      boolean trim =
+          solver.restore(state)
+              || solver.constantSpeed(level.speed, level, state) && solver.restore(state);
+      if (!trim) {
         throw new IllegalStateException("no trim at station " + i);
       }
     }

@@ -34,6 +34,12 @@ final class DifferentialEquation {
   /** Least weight of the speed difference in the choice of state, as a share of weight x radius. */
   private static final double LEAST_WEIGHT = 0.15;
 
+  /** Distance from the edge, over the capacity, within which a correction may change the state. */
+  private static final double EDGE = 1e-4;
+
+  /** Speed difference (rad/s) that counts as none where sticking turns into sliding. */
+  private static final double BARELY = 1e-6;
+
   private final Differential law;
   private final LinearForm differenceOf;
   private final LinearForm speedOf;
@@ -59,6 +65,9 @@ final class DifferentialEquation {
   private double slidingByCage;
   private double slidingBySpeed;
   private double viscousSlope;
+
+  /** Whether sticking is about to turn into sliding, or the reverse. */
+  boolean atEdge;
 
   /** Sticking or sliding at the last evaluation. */
   State state;
@@ -100,6 +109,7 @@ final class DifferentialEquation {
     slidingBySpeed = capacity * law.slidingFactorSlope(speedDifference);
     viscousSlope = law.viscousSlope(speedDifference);
     double friction = torqueDifference - law.viscousTorque(speedDifference);
+    atEdge = false;
     if (capacity == Double.POSITIVE_INFINITY) {
       state = State.STICKING;
     } else if (capacity <= 1e-12 * torqueScale) {
@@ -107,6 +117,7 @@ final class DifferentialEquation {
     } else {
       double weight = Math.max(capacity, LEAST_WEIGHT * torqueScale);
       double z = friction + weight * speedDifference / speedScale;
+      atEdge = Math.abs(Math.abs(z) - sliding) < EDGE * weight;
       state = z > sliding ? State.LEFT_FASTER : z < -sliding ? State.RIGHT_FASTER : State.STICKING;
     }
     residual =
@@ -144,7 +155,8 @@ final class DifferentialEquation {
         Math.abs(torqueDifference),
         Math.abs(speedDifference),
         capacity,
-        state == State.STICKING,
+        state == State.STICKING
+            || state != State.FRICTIONLESS && Math.abs(speedDifference) < BARELY,
         wheelBrakeTorque);
   }
 }

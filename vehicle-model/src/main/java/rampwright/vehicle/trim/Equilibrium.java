@@ -38,6 +38,9 @@ final class Equilibrium {
    */
   private static final double CLOSE = 1e-7;
 
+  /** The same where the correction may change sticking into sliding, whose slopes differ. */
+  private static final double CLOSE_AT_EDGE = 1e-11;
+
   /** Scaled residual beyond which no iteration is tried. */
   private static final double HOPELESS = 1e6;
 
@@ -119,11 +122,12 @@ final class Equilibrium {
     gear = inGear;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       evaluate(state);
-      double worst = assemble(state);
+      double worst = residuals(state);
       if (!(worst < HOPELESS)) {
         return false;
       }
-      boolean last = worst < CLOSE;
+      assemble(state);
+      boolean last = worst < (atEdge() ? CLOSE_AT_EDGE : CLOSE);
       if (!system.solve(size, last ? 2 : 1)) {
         return false;
       }
@@ -132,6 +136,15 @@ final class Equilibrium {
         return true;
       }
       step(state);
+    }
+    return false;
+  }
+
+  private boolean atEdge() {
+    for (DifferentialEquation differential : driveline.differentials) {
+      if (differential.atEdge) {
+        return true;
+      }
     }
     return false;
   }
@@ -153,8 +166,8 @@ final class Equilibrium {
     }
   }
 
-  /** Fills matrix and right-hand side; returns the largest scaled residual. */
-  private double assemble(TrimState state) {
+  /** Computes the right-hand side; returns the largest scaled residual. */
+  private double residuals(TrimState state) {
     double v = state.speed;
     double yawAcceleration = v * v * forces.curvatureGradient + forces.curvature * state.ax;
     double perForce = 1 / forces.weight;
@@ -175,7 +188,19 @@ final class Equilibrium {
     if (row < size) {
       rightSide[row] = -closingResidual(state);
     }
+    double worst = 0;
+    for (int i = 0; i < size; i++) {
+      double miss = Math.abs(rightSide[i]);
+      if (!(miss <= worst)) {
+        worst = miss;
+      }
+    }
+    return worst;
+  }
 
+  /** Fills the matrix and both right-hand sides. */
+  private void assemble(TrimState state) {
+    double v = state.speed;
     column(0, 1, 0, -fy, fx, 0, 0);
     column(1, 0, 1, 0, 0, 0, 0);
     if (speedIsUnknown()) {
@@ -196,16 +221,10 @@ final class Equilibrium {
       forces.slipDirection(driveline.activeWheels[j]);
       storeColumn(3 + j, 0, 0, 0);
     }
-    double worst = 0;
     for (int i = 0; i < size; i++) {
       system.a[system.rightHandSide(i, 0)] = rightSide[i];
       system.a[system.rightHandSide(i, 1)] = i == size - 1 ? 1 : 0;
-      double miss = Math.abs(rightSide[i]);
-      if (!(miss <= worst)) {
-        worst = miss;
-      }
     }
-    return worst;
   }
 
   private void column(
@@ -272,6 +291,35 @@ final class Equilibrium {
 
   private boolean speedIsUnknown() {
     return closing == Closing.ARC && arc.inSpeed;
+  }
+
+  /**
+   * Evaluates a solved state once more, so that forces and torques belong to it. Unlike solving at
+   * its mean slip this does not move a state at which the branch turns back in mean slip.
+   *
+   * @return false when it is no trim at the point where the force balance stands
+   */
+  boolean holds(TrimState state) {
+    closing = Closing.MEAN_SLIP;
+    target = meanSlip(state);
+    evaluate(state);
+    if (!(residuals(state) < CLOSE)) {
+      return false;
+    }
+    state.meanSlip = target;
+    storeTorques(
+        state,
+        driveline.totalTorqueOf.apply(forces.value),
+        driveline.cageSpeedOf.apply(forces.value));
+    return true;
+  }
+
+  private void storeTorques(TrimState state, double torque, double cageSpeed) {
+    state.braking = driveline.braking;
+    state.cageTorque = driveline.braking ? input : torque;
+    state.brakeTorque = driveline.braking ? input - torque : 0;
+    state.cageSpeed = cageSpeed;
+    state.sigma = Double.NaN;
   }
 
   /**
@@ -354,12 +402,8 @@ final class Equilibrium {
       meanSlipRate += j < 3 ? 0 : tangent(j) / driveline.activeWheels.length;
     }
     step(state);
-    state.braking = driveline.braking;
     state.meanSlip = meanSlip(state);
-    state.cageTorque = driveline.braking ? input : torque;
-    state.brakeTorque = driveline.braking ? input - torque : 0;
-    state.cageSpeed = cageSpeed;
-    state.sigma = Double.NaN;
+    storeTorques(state, torque, cageSpeed);
     if (closing == Closing.ARC) {
       for (int j = 0; j < size; j++) {
         rightSide[j] = tangent(j);

@@ -96,7 +96,7 @@ final class LimitTracker {
     Kind now = kindOf(why, limit);
     // the search may have ended on another state
     trial.copyFrom(limit);
-    boolean usable = now != Kind.KINK && equilibrium.atMeanSlip(trial, limit.meanSlip);
+    boolean usable = now != Kind.KINK && equilibrium.holds(trial);
     int nowPattern = pattern();
     if (!usable || now != kind || nowPattern != pattern) {
       known = 0;

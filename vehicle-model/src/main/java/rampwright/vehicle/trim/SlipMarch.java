@@ -366,12 +366,9 @@ final class SlipMarch {
           rising, torqueRising, trial, torqueFalling, torquePart, DIRECTION_TOLERANCE, trial);
     }
     out.copyFrom(gain(trial) >= gain(rising) ? trial : rising);
-    // solved once more so that forces and stability belong to the state that is kept
-    trial.copyFrom(out);
-    if (equilibrium.atMeanSlip(trial, trial.meanSlip)) {
-      grows(trial);
-      out.copyFrom(trial);
-    }
+    // the search may have ended on another state
+    equilibrium.holds(out);
+    grows(out);
   }
 
   /** The growth rate first exceeds the driver's at state {@code i}. */

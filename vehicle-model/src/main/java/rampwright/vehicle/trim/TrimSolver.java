@@ -374,7 +374,7 @@ public final class TrimSolver {
     Equilibrium equilibrium = state.braking ? brake : drive;
     brake.input = state.braking ? state.cageTorque : 0;
     trial.copyFrom(state);
-    boolean solved = equilibrium.atMeanSlip(trial, state.meanSlip);
+    boolean solved = equilibrium.holds(trial);
     if (solved) {
       stability.evaluate(forces, equilibrium.driveline, trial.speed, trial.sideslip);
       trial.sigma = stability.sigma;
