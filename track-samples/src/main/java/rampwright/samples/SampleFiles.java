@@ -6,6 +6,7 @@ import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.stream.Stream;
 
 /** The samples, wherever the jar with them is. */
 public final class SampleFiles {
@@ -24,13 +25,23 @@ public final class SampleFiles {
 
   /** Returns all samples in the order of the index; bad inputs are not among them. */
   public static List<SampleFile> list() {
-    try (InputStream in = open(INDEX)) {
+    return index(INDEX, 3).map(cells -> new SampleFile(cells[0], cells[1], cells[2])).toList();
+  }
+
+  /** Returns the bad inputs that a person would open, each with the message that it must give. */
+  public static List<BadInput> badInputs() {
+    return index(FAILURES + INDEX, 2)
+        .map(cells -> new BadInput(FAILURES + cells[0], cells[1]))
+        .toList();
+  }
+
+  /** Returns the rows of an index; the last cell of a row may hold commas. */
+  private static Stream<String[]> index(String path, int columns) {
+    try (InputStream in = open(path)) {
       return new String(in.readAllBytes(), StandardCharsets.UTF_8)
           .lines()
           .skip(1)
-          .map(line -> line.split(",", 3))
-          .map(cells -> new SampleFile(cells[0], cells[1], cells[2]))
-          .toList();
+          .map(line -> line.split(",", columns));
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }

@@ -1,5 +1,6 @@
 package rampwright.vehicle.differential;
 
+import java.util.Locale;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.input.Quantity;
 
@@ -46,7 +47,8 @@ public record PlateHardware(
           INNER_RADIUS.label(),
           plateInnerRadius * 1e3,
           "mm",
-          "less than the outer radius of " + plateOuterRadius * 1e3 + " mm",
+          String.format(
+              Locale.ROOT, "less than the outer radius of %.1f mm", plateOuterRadius * 1e3),
           "the two were swapped");
     }
   }

@@ -19,6 +19,9 @@ import rampwright.vehicle.input.InvalidInput;
  * </ul>
  */
 public final class CircuitImport {
+  /** Missing turning of a closed circuit that is pointed out (turns). */
+  private static final double CAUTION = 0.03;
+
   private CircuitImport() {}
 
   /**
@@ -107,6 +110,10 @@ public final class CircuitImport {
     report.set(Figure.STATIONS, n);
     report.set(Figure.LENGTH, circuit.length());
     report.set(Figure.TURNING_AFTER, Math.toDegrees(turning));
+    double turns = turning / (2 * Math.PI);
+    if (circuit.closed() && Math.abs(turns - Math.rint(turns)) > CAUTION) {
+      report.warn("The curvature of this closed circuit does not add up to whole turns.");
+    }
     report.note("Stations were taken as they are, neither smoothed nor closed.");
     return new ImportedCircuit(
         circuit,

@@ -137,7 +137,7 @@ final class Dropouts {
               "dropout of the " + kind.label(),
               length,
               "s",
-              "at most " + options.longestDropout() + " s to be bridged",
+              options.dropoutRule(),
               "choose another lap, or allow a longer dropout")
           .at(samples.place(from));
     }

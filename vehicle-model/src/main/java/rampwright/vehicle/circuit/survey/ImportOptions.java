@@ -43,6 +43,15 @@ public record ImportOptions(
     return new ImportOptions(ColumnMapping.GUESSED, 15, 2, true, 1, OptionalInt.empty());
   }
 
+  /** Returns the rule for dropouts in words. */
+  String dropoutRule() {
+    return "at most " + shown(longestDropout) + " s to be bridged";
+  }
+
+  private static String shown(double value) {
+    return value == Math.rint(value) ? Long.toString((long) value) : Double.toString(value);
+  }
+
   /** Returns these options with a mapping as a user writes it ({@link ColumnMapping#parse}). */
   public ImportOptions withColumns(String mapping) {
     ColumnMapping parsed = ColumnMapping.parse(mapping);

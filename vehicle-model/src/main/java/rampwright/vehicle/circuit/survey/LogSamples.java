@@ -105,7 +105,7 @@ final class LogSamples {
               "gap before this row",
               step,
               "s",
-              "at most " + options.longestDropout() + " s to be bridged",
+              options.dropoutRule(),
               "choose another lap, or allow a longer dropout")
           .at(table.place(row));
     }

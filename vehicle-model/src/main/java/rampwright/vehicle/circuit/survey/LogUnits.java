@@ -1,7 +1,6 @@
 package rampwright.vehicle.circuit.survey;
 
 import java.util.Arrays;
-import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import rampwright.vehicle.input.InvalidInput;
@@ -148,15 +147,21 @@ final class LogUnits {
     }
   }
 
-  /** Checks that a closed lap turns about once, or not at all. */
-  void turning(double turning) {
-    double turns = Math.abs(turning) / (2 * Math.PI);
-    String finding = text("the lap turns by %.0f degrees instead of 360", Math.toDegrees(turning));
-    if (turns > 0.15) {
+  /**
+   * Checks how much a closed lap turns. It turns once, or not at all in a figure of eight, and then
+   * the turns to both sides still add up to a whole one at least (Fenchel 1929: the whole absolute
+   * curvature of a closed curve is 2*pi or more).
+   *
+   * @param turning the whole turning (rad)
+   * @param absolute the sum of turns to the left and to the right, both positive (rad)
+   */
+  void turning(double turning, double absolute) {
+    boolean eight = Math.abs(turning) < 0.15 * 2 * Math.PI && absolute > 0.8 * 2 * Math.PI;
+    if (!eight) {
       check(
-          turns,
+          Math.abs(turning) / (2 * Math.PI),
           0.15,
-          finding,
+          text("the lap turns by %.0f degrees instead of 360", Math.toDegrees(turning)),
           new Part(Column.SPEED, -1),
           new Part(Column.LATERAL_ACCELERATION, 1),
           new Part(Column.YAW_RATE, 1),
@@ -179,11 +184,6 @@ final class LogUnits {
                 + used.unit().symbol()
                 + "] in the column mapping")
         .at(table.headerPlace());
-  }
-
-  /** Returns the columns that are used, as the entries of a mapping. */
-  List<String> columns() {
-    return table.mapped().stream().map(MappedColumn::toString).toList();
   }
 
   private static double[] times(double[] a, double[] b) {

@@ -1,5 +1,6 @@
 package rampwright.vehicle.circuit.survey;
 
+import java.util.Arrays;
 import java.util.Locale;
 import java.util.Optional;
 import rampwright.vehicle.input.InvalidInput;
@@ -84,7 +85,8 @@ final class LoggedLap {
             fixes,
             elevation(samples, distance));
     if (options.closed()) {
-      units.turning(track.turning());
+      fixes.ifPresent(found -> checkSign(track, found, lateral));
+      units.turning(track.turning(), track.absoluteTurning());
     }
     report.set(Figure.LENGTH_BY_SPEED, length);
     return track;
@@ -101,6 +103,16 @@ final class LoggedLap {
     }
   }
 
+  /** A lap that turns once goes round its positions in the same sense. */
+  private void checkSign(Track track, Track.Fixes fixes, boolean lateral) {
+    boolean once = Math.abs(Math.abs(track.turning()) - 2 * Math.PI) < 1;
+    if (once && track.turning() * fixes.area() < 0) {
+      throw units.opposite(
+          lateral ? Column.LATERAL_ACCELERATION : Column.YAW_RATE,
+          "by its positions the lap turns the other way");
+    }
+  }
+
   private void checkSpeed(LogSamples samples, double[] speed) {
     for (int i = 0; i < speed.length; i++) {
       if (speed[i] < SLOWEST) {
@@ -108,7 +120,7 @@ final class LoggedLap {
                 "speed",
                 speed[i],
                 "m/s",
-                "at least " + SLOWEST + " m/s all through the lap",
+                String.format(Locale.ROOT, "at least %.0f m/s all through the lap", SLOWEST),
                 "the log holds a stop, or the speed is in another unit")
             .at(samples.place(i));
       }
@@ -137,7 +149,7 @@ final class LoggedLap {
           if (lengths[1] > 0.5 * distance[distance.length - 1]) {
             units.lengths(lengths[0], lengths[1]);
           }
-          Positions.checkJumps(found, table.file());
+          Positions.checkJumps(found, at -> samples.place(Arrays.binarySearch(distance, at)));
         });
     return fixes;
   }
@@ -160,7 +172,7 @@ final class LoggedLap {
       double tail = distance[last] - found.distance(found.size() - 1);
       double head = found.distance(0);
       missing = Positions.missing(found) - tail - head;
-      checkMissing(missing, distance[last]);
+      checkGap(found.gap(), distance[last]);
       report.note("The lap ends where the positions come back to its start.");
     } else {
       report.note("The lap is taken to end one sample after the last one.");
@@ -169,15 +181,15 @@ final class LoggedLap {
     return distance[last] + missing;
   }
 
-  private void checkMissing(double missing, double length) {
+  private void checkGap(double gap, double length) {
     double most = Math.max(30, 0.03 * length);
-    if (Math.abs(missing) > most) {
+    if (gap > most) {
       throw InvalidInput.value(
               "gap between the last position and the first",
-              Math.rint(missing),
+              Math.rint(gap),
               "m",
               String.format(Locale.ROOT, "at most %.0f m", most),
-              "the file does not hold exactly one whole lap")
+              "the file does not hold exactly one whole lap; an open run is imported as not closed")
           .at(table.file());
     }
   }

@@ -2,6 +2,7 @@ package rampwright.vehicle.circuit.survey;
 
 import java.util.Locale;
 import java.util.Optional;
+import java.util.function.DoubleFunction;
 import rampwright.vehicle.input.InvalidInput;
 
 /** Positions of a log or of a list of points, in a plane. */
@@ -10,6 +11,14 @@ final class Positions {
   private static final double CHORD = 10;
 
   private static final double LONGEST_PAUSE = 1;
+
+  /** A step is a jump when it is so many times the way by speed, plus a slack (m). */
+  private static final double JUMP = 1.5;
+
+  private static final double LEAP_SLACK = 15;
+
+  /** As {@link #JUMP} while the unit of speed may still be wrong: km/h for m/s is 3.6 times. */
+  private static final double LEAP = 4.5;
 
   private Positions() {}
 
@@ -96,8 +105,10 @@ final class Positions {
     int anchor = 0;
     boolean broken = false;
     for (int i = 1; i < fixes.size(); i++) {
-      broken |= fixes.distance(i) - fixes.distance(i - 1) > LONGEST_PAUSE * usualSpeed;
+      double way = fixes.distance(i) - fixes.distance(i - 1);
+      broken |= way > LONGEST_PAUSE * usualSpeed;
       double chord = apart(fixes, anchor, i);
+      broken |= apart(fixes, i - 1, i) > LEAP * way + LEAP_SLACK;
       if (chord >= CHORD) {
         if (!broken) {
           bySpeed += fixes.distance(i) - fixes.distance(anchor);
@@ -110,19 +121,23 @@ final class Positions {
     return new double[] {bySpeed, byPosition};
   }
 
-  /** Checks that no fix lies far off the way from the one before. */
-  static void checkJumps(Track.Fixes fixes, String file) {
+  /**
+   * Checks that no fix lies far off the way from the one before.
+   *
+   * @param place where in the file the sample of a distance stands
+   */
+  static void checkJumps(Track.Fixes fixes, DoubleFunction<String> place) {
     for (int i = 1; i < fixes.size(); i++) {
       double way = fixes.distance(i) - fixes.distance(i - 1);
       double chord = apart(fixes, i - 1, i);
-      if (chord > 1.5 * way + 15) {
+      if (chord > JUMP * way + LEAP_SLACK) {
         throw InvalidInput.value(
                 "step of the position",
                 chord,
                 "m",
                 String.format(Locale.ROOT, "about the %.1f m driven meanwhile by speed", way),
                 "the receiver lost its place: leave those cells empty")
-            .at(String.format(Locale.ROOT, "%s, %.0f m after the start", file, fixes.distance(i)));
+            .at(place.apply(fixes.distance(i)));
       }
     }
   }

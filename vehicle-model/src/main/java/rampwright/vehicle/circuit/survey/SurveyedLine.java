@@ -13,7 +13,7 @@ final class SurveyedLine {
   private static final int FEWEST = 8;
 
   /** A step of so many usual ones and so many metres is a hole in the line. */
-  private static final double HOLE_RATIO = 30;
+  private static final double HOLE_RATIO = 20;
 
   private static final double HOLE = 100;
 

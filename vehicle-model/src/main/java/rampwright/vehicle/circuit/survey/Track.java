@@ -20,6 +20,9 @@ record Track(
     Optional<Fixes> fixes,
     Optional<Curve> elevation) {
 
+  /** Over this distance (m) noise of the direction hardly adds to its changes. */
+  private static final double STEP = 10;
+
   /** A sensor whose zero may be off. */
   enum Offset {
     NONE,
@@ -42,6 +45,22 @@ record Track(
 
     double distance(int i) {
       return east.x(i);
+    }
+
+    /** Returns the distance between the last position and the first (m). */
+    double gap() {
+      int last = size() - 1;
+      return Math.hypot(east.y(0) - east.y(last), north.y(0) - north.y(last));
+    }
+
+    /** Returns the area inside the positions (m²), positive where they go round to the left. */
+    double area() {
+      double area = 0;
+      for (int i = 0; i < size(); i++) {
+        int k = (i + 1) % size();
+        area += 0.5 * (east.y(i) * north.y(k) - east.y(k) * north.y(i));
+      }
+      return area;
     }
 
     Curve points() {
@@ -73,6 +92,15 @@ record Track(
   /** Returns the whole turning (rad). */
   double turning() {
     return heading.at(length) - heading.at(0);
+  }
+
+  /** Returns the turns to the left and to the right, both counted positive (rad). */
+  double absoluteTurning() {
+    double sum = 0;
+    for (double at = STEP; at <= length; at += STEP) {
+      sum += Math.abs(heading.at(at) - heading.at(at - STEP));
+    }
+    return sum;
   }
 
   /**
