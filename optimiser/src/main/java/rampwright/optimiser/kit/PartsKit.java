@@ -159,6 +159,19 @@ public record PartsKit(
     this(name, hardware, ringSets, facesPerSide, preload, changeTimes, Optional.empty());
   }
 
+  /** Returns this kit with another plate friction: other oil, other temperature, worn plates. */
+  public PartsKit withPlateFriction(double friction) {
+    PlateHardware changed =
+        new PlateHardware(
+            hardware.plateOuterRadius(),
+            hardware.plateInnerRadius(),
+            friction,
+            hardware.rampRadius(),
+            hardware.rampFriction(),
+            hardware.pressure());
+    return new PartsKit(name, changed, ringSets, facesPerSide, preload, changeTimes, springs);
+  }
+
   /**
    * Returns the ring set of a name.
    *

@@ -51,6 +51,7 @@ final class GeneticSearch {
     Engine<IntegerGene, Merit> engine =
         new Engine.Builder<IntegerGene, Merit>(this::evaluated, this::randomGenes)
             .populationSize(POPULATION)
+            .maximalPhenotypeAge(Long.MAX_VALUE)
             .optimize(Optimize.MINIMUM)
             .survivorsSelector(new EliteSelector<>(ELITE))
             .offspringSelector(new TournamentSelector<>(2))

@@ -65,6 +65,11 @@ public final class SettingEvaluator {
         setting, build.law(), figures.lapTime(), measures, limits, violation(limits));
   }
 
+  /** Returns the weighted lap time (s) of any setting. */
+  double lapTime(NamedSetting setting) {
+    return figures(setting.differentials()).lapTime();
+  }
+
   /** Returns the violation (-) of the limits that stand on the parts alone: it needs no lap. */
   double partViolation(PlateDifferential law) {
     return violation(checks(partMeasures(law)));
