@@ -2,6 +2,7 @@ package rampwright.web;
 
 import com.vaadin.flow.component.page.AppShellConfigurator;
 import com.vaadin.flow.component.page.Push;
+import com.vaadin.flow.server.AppShellSettings;
 import com.vaadin.flow.theme.Theme;
 import org.springframework.boot.SpringApplication;
 import org.springframework.boot.autoconfigure.SpringBootApplication;
@@ -12,6 +13,11 @@ import org.springframework.boot.autoconfigure.SpringBootApplication;
 @Push
 public class RampwrightApplication implements AppShellConfigurator {
   private static final long serialVersionUID = 1L;
+
+  @Override
+  public void configurePage(AppShellSettings settings) {
+    settings.addFavIcon("icon", "rampwright/mark.svg", "any");
+  }
 
   /**
    * Starts the web page on the address of {@code application.properties}.

@@ -135,7 +135,7 @@ final class RunPanel extends Section {
         + " evaluations · "
         + Shown.of(perSecond, 1, "per second")
         + " · about "
-        + Shown.of(Math.ceil(left), 0, "s")
+        + (left > 120 ? Shown.of(left / 60, 0, "min") : Shown.of(Math.ceil(left), 0, "s"))
         + " left · best "
         + Shown.of(latest.bestLapTime(), 3, "s")
         + (latest.bestFeasible() ? ", all limits met" : ", not all limits met yet");
