@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import rampwright.samples.SampleFile;
 import rampwright.samples.SampleFiles;
@@ -22,12 +23,17 @@ final class Samples {
   /** Copies every sample below a folder and returns the folder. */
   static Path copy(Path folder) throws IOException {
     for (SampleFile sample : SampleFiles.list()) {
-      Path to = folder.resolve(sample.path());
-      Files.createDirectories(to.getParent());
-      try (InputStream in = SampleFiles.open(sample.path())) {
-        Files.copy(in, to);
-      }
+      copy(sample.path(), folder);
     }
     return folder;
+  }
+
+  /** Copies one file below the samples to the same path below a folder. */
+  static void copy(String path, Path folder) throws IOException {
+    Path to = folder.resolve(path);
+    Files.createDirectories(to.getParent());
+    try (InputStream in = SampleFiles.open(path)) {
+      Files.copy(in, to, StandardCopyOption.REPLACE_EXISTING);
+    }
   }
 }
