@@ -13,9 +13,9 @@ import java.util.List;
  * @param tyreWorkFront sliding work of the front tyres over the lap (J)
  * @param tyreWorkRear sliding work of the rear tyres over the lap (J)
  * @param exitUndersteerAngle mean understeer angle over all exits, weighted by time (rad)
- * @param peakSigmaEntry largest slide growth rate in braking and entry (1/s)
- * @param peakSigmaExit largest slide growth rate in apex and exit (1/s)
- * @param peakInnerSlip largest slip of an inner driven wheel on exits (-)
+ * @param peakSigmaEntry largest slide growth rate in braking and entry (1/s), NaN without them
+ * @param peakSigmaExit largest slide growth rate in apex and exit (1/s), NaN without them
+ * @param peakInnerSlip largest slip of an inner driven wheel on exits (-), NaN without them
  */
 public record LapReport(
     double lapTime,

@@ -1,5 +1,7 @@
 package rampwright.vehicle.balance;
 
+import rampwright.vehicle.differential.Differential;
+import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.lap.Channel;
 
 /** Where in the car a differential sits. */
@@ -21,6 +23,24 @@ public enum UnitPosition {
   /** Returns the words for people. */
   public String label() {
     return label;
+  }
+
+  /** Returns the differential in this position. */
+  public Differential of(DifferentialSet set) {
+    return switch (this) {
+      case FRONT -> set.front();
+      case CENTRE -> set.centre();
+      case REAR -> set.rear();
+    };
+  }
+
+  /** Returns a set with another differential in this position. */
+  public DifferentialSet with(DifferentialSet set, Differential other) {
+    return switch (this) {
+      case FRONT -> new DifferentialSet(other, set.centre(), set.rear());
+      case CENTRE -> new DifferentialSet(set.front(), other, set.rear());
+      case REAR -> new DifferentialSet(set.front(), set.centre(), other);
+    };
   }
 
   Channel torqueDifference() {
