@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.linear.MatrixUtils;
 import org.apache.commons.math3.linear.RealMatrix;
+import org.apache.commons.math3.linear.RealVector;
 import org.apache.commons.math3.linear.SingularValueDecomposition;
 import rampwright.vehicle.circuit.Segment.Straight;
 import rampwright.vehicle.input.InvalidInput;
@@ -12,6 +13,9 @@ import rampwright.vehicle.input.InvalidInput;
 public final class SegmentLine {
   /** Step of the integration within a spacing (m). */
   private static final double STEP = 0.25;
+
+  /** Gap of the straights (m) that is small enough to be closed by the curvature instead. */
+  private static final double LARGEST_GAP = 0.05;
 
   private SegmentLine() {}
 
@@ -101,13 +105,18 @@ public final class SegmentLine {
       end = line.end().in(end);
     }
     RealMatrix effect = MatrixUtils.createRealMatrix(effects.toArray(double[][]::new)).transpose();
-    double[] change =
-        new SingularValueDecomposition(effect)
-            .getSolver()
-            .solve(
-                MatrixUtils.createRealVector(
-                    new double[] {-end.x(), -end.y(), length - length(segments)}))
-            .toArray();
+    RealVector missing =
+        MatrixUtils.createRealVector(new double[] {-end.x(), -end.y(), length - length(segments)});
+    double[] change = new SingularValueDecomposition(effect).getSolver().solve(missing).toArray();
+    double left = missing.subtract(effect.operate(MatrixUtils.createRealVector(change))).getNorm();
+    if (left > LARGEST_GAP) {
+      throw InvalidInput.value(
+          "gap that no lengths of the straights close",
+          left,
+          "m",
+          "below " + LARGEST_GAP + " m",
+          "another length of the lap fits, or a straight in another direction is needed");
+    }
     List<Segment> joined = new ArrayList<>(segments);
     for (int k = 0; k < change.length; k++) {
       int i = straights.get(k);
