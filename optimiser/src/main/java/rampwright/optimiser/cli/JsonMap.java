@@ -9,7 +9,8 @@ final class JsonMap {
   private final Map<String, Object> entries = new LinkedHashMap<>();
 
   JsonMap put(String name, double value) {
-    entries.put(name, Double.isFinite(value) ? value : null);
+    // adding zero turns a negative zero into zero
+    entries.put(name, Double.isFinite(value) ? value + 0.0 : null);
     return this;
   }
 
