@@ -73,10 +73,10 @@ final class Drawing {
             + "</text>");
   }
 
-  /** Returns the element. */
-  String svg() {
+  /** Returns the element, as large as it was drawn times a scale. */
+  String svg(double scale) {
     return format("<svg xmlns='http://www.w3.org/2000/svg' viewBox='0 0 %.1f %.1f' ", width, height)
-        + format("style='width:%.1fmm;height:%.1fmm'>", width, height)
+        + format("style='width:%.1fmm;height:%.1fmm'>", scale * width, scale * height)
         + body
         + "</svg>";
   }

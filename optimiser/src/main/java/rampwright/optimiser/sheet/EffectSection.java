@@ -30,9 +30,10 @@ final class EffectSection {
 
   private void laps() {
     html.heading("Expected lap against the setting in the car (computed, driver's limits)")
-        .raw("<table class='rows'><tr><th style='width:40%'>Circuit</th>")
+        .raw("<table class='rows'><tr><th style='width:31%'>Circuit</th>")
         .raw("<th class='num'>Weight</th><th class='num'>In the car</th>")
-        .raw("<th class='num'>This setting</th><th class='num'>Difference</th></tr>");
+        .raw("<th class='num'>This setting</th><th class='num'>Difference</th>")
+        .raw("<th class='num' style='width:17%'>Band</th></tr>");
     for (ExpectedLap lap : sheet.laps()) {
       html.raw("<tr>")
           .cell("", Shown.cut(lap.circuit(), SheetHtml.LONGEST_NAME))
@@ -41,14 +42,21 @@ final class EffectSection {
           .cell("num", Shown.lapTime(lap.lapTime()))
           .raw("<td class='num'>")
           .element("b", "", Shown.signed(lap.difference(), 3) + "\u00a0s")
-          .raw("</td></tr>");
+          .raw("</td>")
+          .cell("num", band(lap))
+          .raw("</tr>");
     }
     html.raw("</table>")
         .element(
             "p",
             "class='small'",
-            "Minus is faster. A driver's laps scatter by 0.1 to 0.2 s (common practice, no source):"
-                + " a smaller difference shows in no single lap.");
+            "Minus is faster. Band: plate friction ±15 % in both settings, preload as on the bench."
+                + " A driver's laps scatter by 0.1 to 0.2 s: a smaller difference shows in no single"
+                + " lap (both figures: common practice, no source).");
+  }
+
+  private static String band(ExpectedLap lap) {
+    return Shown.signed(lap.lowest(), 3) + " to " + Shown.signed(lap.highest(), 3) + "\u00a0s";
   }
 
   private void corners() {

@@ -5,6 +5,7 @@ import java.util.List;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.event.WeightedCircuit;
+import rampwright.optimiser.kit.PartsKit;
 import rampwright.optimiser.sheet.SetupSheet.CornerEffect;
 import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.vehicle.balance.CornerReport;
@@ -36,8 +37,36 @@ final class LapComparison {
         circuit.weight(),
         wanted.time(),
         current.time(),
+        difference(event, setting, circuit, 1 - BenchCheck.FRICTION_SCATTER),
+        difference(event, setting, circuit, 1 + BenchCheck.FRICTION_SCATTER),
         corners,
         gap.seconds(0));
+  }
+
+  /** Difference of the lap times (s) with another plate friction in both units. */
+  private static double difference(
+      Event event, NamedSetting setting, WeightedCircuit circuit, double factor) {
+    if (setting.differentials().equals(event.current().differentials())) {
+      return 0;
+    }
+    PartsKit kit = event.kit().withPlateFriction(factor * event.kit().hardware().plateFriction());
+    return lap(event, with(event, setting, kit), circuit).time()
+        - lap(event, with(event, event.current(), kit), circuit).time();
+  }
+
+  /** The setting built from another kit; a setting that is not from the kit stays as it is. */
+  private static NamedSetting with(Event event, NamedSetting setting, PartsKit kit) {
+    return setting
+        .kitSetting()
+        .map(
+            wanted ->
+                NamedSetting.of(
+                    setting.name(),
+                    kit,
+                    wanted,
+                    event.car().driveline().layout(),
+                    setting.differentials()))
+        .orElse(setting);
   }
 
   private static Lap lap(Event event, NamedSetting setting, WeightedCircuit circuit) {

@@ -22,14 +22,14 @@ final class RampDrawing {
   private RampDrawing() {}
 
   /** Returns the drawing as SVG. */
-  static String of(PlateBuild build) {
+  static String of(PlateBuild build, double scale) {
     RampDrawing ramps = new RampDrawing();
     ramps.ring(build, -1);
     ramps.ring(build, 1);
     ramps.drawing.circle(CX, CY, PIN, Drawing.PART);
     ramps.drawing.words(CX, CY + 0.8, 2.3, "middle", false, "pin");
     ramps.labels(build);
-    return ramps.drawing.svg();
+    return ramps.drawing.svg(scale);
   }
 
   /** Draws one ring; {@code side} is -1 for the left one and 1 for the right one. */

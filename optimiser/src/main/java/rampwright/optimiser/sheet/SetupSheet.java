@@ -52,6 +52,15 @@ public record SetupSheet(
     cautions = List.copyOf(cautions);
   }
 
+  /** Returns the labels of the limits that this setting breaks. */
+  public List<String> brokenLimits() {
+    return limits.stream()
+        .filter(line -> line.met().equals(Optional.of(false)))
+        .map(line -> line.limit().measure().quantity().label())
+        .distinct()
+        .toList();
+  }
+
   /**
    * What a circuit answers to the setting.
    *
@@ -59,6 +68,9 @@ public record SetupSheet(
    * @param weight how much its lap time counts (-)
    * @param lapTime lap time of this setting (s)
    * @param currentLapTime lap time of the setting that is in the car (s)
+   * @param weakPlates difference of the lap times (s) when the plates of both settings grip {@link
+   *     BenchCheck#FRICTION_SCATTER} less than the kit says, preload as the bench shows it
+   * @param strongPlates the same when they grip more
    * @param corners difference by corner in driving order; with {@code outside} they add up to the
    *     difference of the lap times
    * @param outside difference outside corners (s)
@@ -68,11 +80,23 @@ public record SetupSheet(
       double weight,
       double lapTime,
       double currentLapTime,
+      double weakPlates,
+      double strongPlates,
       List<CornerEffect> corners,
       double outside) {
     /** Copies the corners. */
     public ExpectedLap {
       corners = List.copyOf(corners);
+    }
+
+    /** Returns the smallest of the three differences (s). */
+    public double lowest() {
+      return Math.min(difference(), Math.min(weakPlates, strongPlates));
+    }
+
+    /** Returns the largest of the three differences (s). */
+    public double highest() {
+      return Math.max(difference(), Math.max(weakPlates, strongPlates));
     }
 
     /** Returns this setting's lap time less the current one's (s); negative is faster. */

@@ -12,14 +12,19 @@ final class SheetHtml {
   /** Longest name that is printed whole. */
   static final int LONGEST_NAME = 90;
 
+  /** Font size (pt) down to which drawings keep their size. */
+  private static final double USUAL_SIZE = 8;
+
   /** Words shorter than this stay on one line. */
   private static final int LONGEST_WHOLE = 40;
 
   private final SetupSheet sheet;
+  private final double scale;
   private final Markup page = new Markup();
 
-  private SheetHtml(SetupSheet sheet) {
+  private SheetHtml(SetupSheet sheet, double scale) {
     this.sheet = sheet;
+    this.scale = scale;
   }
 
   /**
@@ -30,7 +35,7 @@ final class SheetHtml {
    * @param corners most corners to be listed for one circuit
    */
   static String of(SetupSheet sheet, String style, double size, int corners) {
-    SheetHtml html = new SheetHtml(sheet);
+    SheetHtml html = new SheetHtml(sheet, Math.min(1, size / USUAL_SIZE));
     html.page
         .raw("<html><head><title>")
         .words("Setup sheet: " + sheet.setting())
@@ -39,6 +44,7 @@ final class SheetHtml {
     html.head();
     html.facts();
     html.tiles();
+    html.broken();
     html.drawings();
     html.benchAndChange();
     html.page.raw(new EffectSection(sheet, corners).html());
@@ -64,7 +70,7 @@ final class SheetHtml {
     Drawing drawing = new Drawing(10, 9);
     drawing.polygon("fill='#000'", 0, 8.6, 10, 8.6, 10, 2.6);
     drawing.circle(3.6, 3.3, 2.2, "fill='none' stroke='#000' stroke-width='0.7'");
-    return drawing.svg();
+    return drawing.svg(1);
   }
 
   private void facts() {
@@ -77,8 +83,8 @@ final class SheetHtml {
     fact(
         "Driver backs off at slide growth",
         List.of(
-            Shown.brief(sheet.driver().powerGrowth(), 2) + " 1/s on power,",
-            Shown.brief(sheet.driver().brakingGrowth(), 2) + " 1/s braking in a turn"));
+            Shown.number(sheet.driver().powerGrowth(), 1) + " 1/s on power,",
+            Shown.number(sheet.driver().brakingGrowth(), 1) + " 1/s braking in a turn"));
     page.raw("</tr></table>");
   }
 
@@ -122,8 +128,18 @@ final class SheetHtml {
     tile(
         "Preload, whole difference",
         Shown.torque(build.preload()),
-        "springs press with " + Shown.number(build.preloadForce(), 0) + "\u00a0N on each side");
+        "springs press " + Shown.number(build.preloadForce(), 0) + "\u00a0N on each pack");
     page.raw("</tr></table>");
+  }
+
+  private void broken() {
+    List<String> broken = sheet.brokenLimits();
+    if (!broken.isEmpty()) {
+      page.raw("<p class='broken'>")
+          .words("Breaks " + (broken.size() == 1 ? "a limit" : "limits") + " of the event: ")
+          .words(String.join(", ", broken) + ". See the limits below before it is released.")
+          .raw("</p>");
+    }
   }
 
   private void tile(String label, String value, String note) {
@@ -149,7 +165,7 @@ final class SheetHtml {
   private void drawings() {
     page.raw("<table class='cols'><tr><td class='col' style='width:123mm'>")
         .heading("Stack order, both sides alike (mirror image)")
-        .raw(StackDrawing.of(sheet.stack()))
+        .raw(StackDrawing.of(sheet.stack(), scale))
         .raw("<p class='small'>")
         .element("b", "", "From the pressure ring outwards: ")
         .words(sheet.stack().order() + ". ")
@@ -160,7 +176,7 @@ final class SheetHtml {
                 + " spring sit: maker's manual.")
         .raw("</p></td><td class='col'>")
         .heading("Ramps, seen from outside")
-        .raw(RampDrawing.of(sheet.build()))
+        .raw(RampDrawing.of(sheet.build(), scale))
         .element(
             "p",
             "class='small'",
@@ -209,7 +225,10 @@ final class SheetHtml {
           .element("span", "class='small'", who + " (name, date, signature)")
           .raw("</td>");
     }
-    page.raw("</tr></table>").heading("Notes of crew and driver");
+    page.raw("</tr></table>")
+        .raw("<div class='notes'>")
+        .heading("Notes of crew and driver")
+        .raw("</div>");
   }
 
   private static String name(String name) {

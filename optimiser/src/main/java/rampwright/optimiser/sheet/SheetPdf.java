@@ -93,7 +93,7 @@ public final class SheetPdf {
     try (PDPageContentStream lines =
         new PDPageContentStream(document, document.getPage(0), AppendMode.APPEND, true, true)) {
       lines.setLineWidth(0.4f);
-      for (float y = from - NOTE_LINE; y > LOWER_MARGIN; y -= NOTE_LINE) {
+      for (float y = from; y > LOWER_MARGIN; y -= NOTE_LINE) {
         lines.moveTo(SIDE_MARGIN, y);
         lines.lineTo(right, y);
       }

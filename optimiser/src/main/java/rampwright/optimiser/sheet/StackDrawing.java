@@ -27,14 +27,14 @@ final class StackDrawing {
   private StackDrawing() {}
 
   /** Returns the drawing as SVG. */
-  static String of(PlateStack stack) {
+  static String of(PlateStack stack, double scale) {
     StackDrawing drawing = new StackDrawing();
     double end = drawing.plates(stack.plates());
     drawing.row(end, 38, "plate");
     drawing.row(end, MARKS + 1.8, "friction face, " + stack.faces() + " on each side");
     drawing.innerParts();
     drawing.outerParts(end);
-    return drawing.drawing.svg();
+    return drawing.drawing.svg(scale);
   }
 
   private void row(double end, double y, String words) {

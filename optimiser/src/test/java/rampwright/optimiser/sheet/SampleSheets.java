@@ -139,7 +139,9 @@ final class SampleSheets {
         effects.add(new CornerEffect(k, 211.0 * k, 20 + k, -0.001 * k, "cornering speed"));
       }
       double total = -0.001 * corners * (corners + 1) / 2;
-      laps.add(new ExpectedLap("circuit " + (i + 1) + " " + name, 1, 90, 90 - total, effects, 0));
+      laps.add(
+          new ExpectedLap(
+              "circuit " + (i + 1) + " " + name, 1, 90, 90 - total, total / 2, 0.01, effects, 0));
     }
     List<LimitLine> limits = new ArrayList<>();
     for (int i = 0; i < copiesOfLimits; i++) {

@@ -8,10 +8,13 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import rampwright.optimiser.event.Event;
+import rampwright.optimiser.event.NamedSetting;
 import rampwright.optimiser.event.WeightedCircuit;
 import rampwright.optimiser.sheet.SetupSheet.CornerEffect;
 import rampwright.optimiser.sheet.SetupSheet.ExpectedLap;
 import rampwright.vehicle.balance.LapAnalysis;
+import rampwright.vehicle.differential.DifferentialSet;
+import rampwright.vehicle.differential.PlateDifferential;
 import rampwright.vehicle.input.InvalidInput;
 import rampwright.vehicle.lap.Lap;
 import rampwright.vehicle.lap.LapSolver;
@@ -124,6 +127,35 @@ class SetupSheetsTest {
     // the slowest point of a hairpin of 20 m radius at 0.95 of the tyre's friction of about 1.5
     assertThat(lap.corners().get(0).slowestSpeed()).isBetween(14.0, 19.0);
     assertThat(lap.corners().get(0).cause()).isNotEmpty();
+  }
+
+  @Test
+  void theBandHoldsTheDifferencesOfWeakerAndStrongerPlates() {
+    ExpectedLap lap = SHEET.laps().get(1);
+    assertThat(lap.weakPlates()).isCloseTo(difference(0.85 * 0.11), within(1e-12));
+    assertThat(lap.strongPlates()).isCloseTo(difference(1.15 * 0.11), within(1e-12));
+    assertThat(lap.lowest()).isLessThan(lap.highest());
+    assertThat(lap.difference()).isBetween(lap.lowest(), lap.highest());
+  }
+
+  /** The laws by hand: the preload stays, the shares go with the friction. */
+  private static double difference(double friction) {
+    PlateDifferential harder =
+        new PlateDifferential(80, K_DRIVE * friction / 0.11, K_COAST * friction / 0.11);
+    double pack = 6 * friction * 0.044 / 0.034;
+    PlateDifferential raced =
+        new PlateDifferential(
+            60,
+            pack / Math.tan(Math.toRadians(60) + Math.atan(0.08)),
+            pack / Math.tan(Math.toRadians(45) + Math.atan(0.08)));
+    return time(harder) - time(raced);
+  }
+
+  private static double time(PlateDifferential law) {
+    NamedSetting setting = new NamedSetting("law", Optional.empty(), DifferentialSet.rear(law));
+    return LapSolver.solve(
+            EVENT.lapRequest(setting, EVENT.circuits().get(1).circuit(), LimitForm.DRIVER))
+        .time();
   }
 
   private static Lap lap(String setting, WeightedCircuit circuit) {

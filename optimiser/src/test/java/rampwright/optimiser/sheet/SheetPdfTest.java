@@ -41,7 +41,7 @@ class SheetPdfTest {
         .contains("Change from “as raced”, now in the car")
         .contains("grip 0.95, fuel 30 kg, air 1.225 kg/m³, wind 3 m/s from 90°")
         .contains("40/80")
-        .contains("events/skid pan 2 9.778 s 9.778 s 0.000 s")
+        .contains("events/skid pan 2 9.778 s 9.778 s 0.000 s 0.000 to 0.000 s")
         .contains("NOT turned, stamped 40° / 80°")
         .contains("40° / 80° drive / coast")
         .contains("Friction faces per side 8")
@@ -52,6 +52,7 @@ class SheetPdfTest {
         .contains("Ring set: take out 45/60, fit 40/80 not turned.")
         .contains("mm on each side to start with")
         .contains("Disc springs 1 parallel × 2 in series, 100 × 72 × 3, cone height 1.8 mm")
+        .contains("Breaks limits of the event: preload, drive locking share.")
         .contains("Time needed: 60 min")
         .contains("preload ≥ 90 N·m 80 N·m BROKEN")
         .contains("coast locking share ≤ 0.2")
@@ -73,7 +74,7 @@ class SheetPdfTest {
   @Test
   void twoCircuitsWithTwelveCornersAndLongNamesFit() throws IOException {
     String name = "of an unusually long name that somebody typed with patience and care, part two";
-    String words = words(pdf(SampleSheets.full(2, 12, 4, name)));
+    String words = words(pdf(SampleSheets.full(2, 12, 3, name)));
     assertThat(words)
         .contains("setting " + name)
         .contains("circuit 2 " + name)
