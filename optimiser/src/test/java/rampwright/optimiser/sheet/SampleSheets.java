@@ -108,7 +108,7 @@ final class SampleSheets {
             new Straight(120),
             Corner.degrees(20, 180, 20),
             new Straight(120),
-            Corner.degrees(35, 180, 20)),
+            Corner.degrees(20, 180, 20)),
         450,
         5);
   }
