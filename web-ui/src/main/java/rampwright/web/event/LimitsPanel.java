@@ -6,6 +6,7 @@ import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.LimitedMeasure;
 import rampwright.optimiser.event.SettingLimit;
 import rampwright.web.store.EventChange;
+import rampwright.web.widget.LimitWords;
 import rampwright.web.widget.Notice;
 import rampwright.web.widget.QuantityForm;
 import rampwright.web.widget.Section;
@@ -24,13 +25,9 @@ final class LimitsPanel extends Section {
               .mapToDouble(SettingLimit::value)
               .findFirst()
               .orElse(Double.NaN);
-      form.with(words(measure), measure.quantity(), value);
+      form.with(LimitWords.of(measure), measure.quantity(), value);
     }
     add(Notice.hint("An empty field sets no limit."), form);
-  }
-
-  private static String words(LimitedMeasure measure) {
-    return (measure.lower() ? "Least " : "Most ") + measure.quantity().label();
   }
 
   private static void save(QuantityForm.Values values, EventEditor editor) {

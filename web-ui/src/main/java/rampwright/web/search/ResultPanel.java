@@ -11,9 +11,9 @@ import rampwright.optimiser.search.EvaluatedSetting;
 import rampwright.optimiser.search.LimitCheck;
 import rampwright.optimiser.search.SearchResult;
 import rampwright.vehicle.differential.PlateDifferential;
-import rampwright.vehicle.input.Quantity;
 import rampwright.web.store.EventStore;
 import rampwright.web.store.StoredRun;
+import rampwright.web.widget.LimitWords;
 import rampwright.web.widget.Notice;
 import rampwright.web.widget.SettingWords;
 import rampwright.web.widget.Shown;
@@ -66,26 +66,17 @@ final class ResultPanel extends Div {
 
   private static Grid<LimitCheck> limits(List<LimitCheck> checks) {
     Grid<LimitCheck> table = Tables.dense();
-    table.addColumn(check -> quantity(check).label()).setHeader("Limit").setFlexGrow(3);
-    Tables.number(table, "Value", check -> value(quantity(check), check.value()));
+    table
+        .addColumn(check -> LimitWords.of(check.limit().measure()))
+        .setHeader("Limit")
+        .setFlexGrow(3);
     Tables.number(
-        table,
-        "Allowed",
-        check ->
-            (check.limit().measure().lower() ? "at least " : "at most ")
-                + Shown.of(quantity(check), check.limit().value()));
-    table.addColumn(check -> check.met() ? "✓ met" : "✗ broken").setHeader("").setAutoWidth(true);
+        table, "Value", check -> LimitWords.value(check.limit().measure(), check.value()));
+    Tables.number(table, "Allowed", check -> LimitWords.allowed(check.limit()));
+    table.addColumn(check -> LimitWords.met(check.met())).setHeader("").setAutoWidth(true);
     table.setItems(checks);
     table.setAllRowsVisible(true);
     return table;
-  }
-
-  private static Quantity quantity(LimitCheck check) {
-    return check.limit().measure().quantity();
-  }
-
-  private static String value(Quantity quantity, double si) {
-    return Shown.of(si / quantity.siPerUnit(), 3, quantity.unit());
   }
 
   private static Grid<AlikeGroup> alike(StoredRun run, List<AlikeGroup> groups, EventStore events) {

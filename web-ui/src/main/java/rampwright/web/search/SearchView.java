@@ -54,7 +54,7 @@ class SearchView extends Div implements BeforeEnterObserver {
     Optional<StoredRun> run =
         wanted.or(() -> known.stream().findFirst().map(RunSummary::id)).flatMap(runs::find);
     Div parts = new Div(new StartPanel(stored.event(), this::start));
-    parts.addClassName("rw-sections");
+    parts.addClassNames("rw-sections", "rw-side-and-main");
     run.ifPresentOrElse(
         found -> parts.add(new RunPanel(found, jobs, events, this::open, this::repeat)),
         () ->

@@ -7,13 +7,14 @@ import com.vaadin.flow.component.html.ListItem;
 import com.vaadin.flow.component.html.OrderedList;
 import com.vaadin.flow.component.html.UnorderedList;
 import java.util.List;
+import rampwright.optimiser.event.LimitedMeasure;
 import rampwright.optimiser.sheet.BenchCheck.Target;
 import rampwright.optimiser.sheet.SetupSheet;
 import rampwright.vehicle.differential.PlateBuild;
 import rampwright.vehicle.differential.PlateDifferential;
 import rampwright.vehicle.differential.RingSet;
-import rampwright.vehicle.input.Quantity;
 import rampwright.web.widget.Facts;
+import rampwright.web.widget.LimitWords;
 import rampwright.web.widget.Section;
 import rampwright.web.widget.Shown;
 
@@ -40,7 +41,7 @@ final class SheetPreview extends Div {
         .with("Drive ramp", Shown.of(RingSet.DRIVE_ANGLE, build.driveAngle()))
         .with("Coast ramp", Shown.of(RingSet.COAST_ANGLE, build.coastAngle()))
         .with("Friction faces per side", String.valueOf(build.facesPerSide()))
-        .with("Plates on each side", sheet.stack().order())
+        .with("Plates on each side", sheet.stack().order() + " (C: case, G: side gear)")
         .with("Preload", Shown.of(PlateDifferential.PRELOAD, build.preload()))
         .with("Spring force on each pack", Shown.of(build.preloadForce(), 0, "N"));
   }
@@ -97,23 +98,16 @@ final class SheetPreview extends Div {
   private static Facts limits(SetupSheet sheet) {
     Facts facts = new Facts();
     for (SetupSheet.LimitLine line : sheet.limits()) {
-      Quantity quantity = line.limit().measure().quantity();
-      String rule =
-          (line.limit().measure().lower() ? "at least " : "at most ")
-              + Shown.of(quantity, line.limit().value());
+      LimitedMeasure measure = line.limit().measure();
       String value =
           line.value().isPresent()
-              ? Shown.of(quantity, rounded(quantity, line.value().getAsDouble()))
+              ? LimitWords.value(measure, line.value().getAsDouble())
               : "not known";
-      String met = line.met().map(ok -> ok ? "✓ met" : "✗ not met").orElse("");
-      facts.with(quantity.label(), value + ", " + rule + "  " + met);
+      String met = line.met().map(LimitWords::met).orElse("");
+      facts.with(
+          LimitWords.of(measure), value + ", " + LimitWords.allowed(line.limit()) + "  " + met);
     }
     return facts;
-  }
-
-  private static double rounded(Quantity quantity, double si) {
-    double shown = si / quantity.siPerUnit();
-    return Math.rint(shown * 1000) / 1000 * quantity.siPerUnit();
   }
 
   private static <T extends HtmlContainer> T list(T list, List<String> lines) {

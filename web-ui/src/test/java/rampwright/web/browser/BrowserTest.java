@@ -7,6 +7,7 @@ import com.microsoft.playwright.BrowserContext;
 import com.microsoft.playwright.BrowserType;
 import com.microsoft.playwright.Page;
 import com.microsoft.playwright.Playwright;
+import com.microsoft.playwright.assertions.PlaywrightAssertions;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeAll;
@@ -25,6 +26,9 @@ import org.springframework.test.context.ActiveProfiles;
 abstract class BrowserTest {
   private static Playwright playwright;
   private static Browser browser;
+
+  /** A lap on a busy machine takes longer than a click (ms). */
+  private static final double PATIENCE = 120_000;
 
   @LocalServerPort private int port;
   private BrowserContext context;
@@ -55,6 +59,8 @@ abstract class BrowserTest {
   void openPage() {
     context = browser.newContext(new Browser.NewContextOptions().setViewportSize(1440, 900));
     page = context.newPage();
+    page.setDefaultTimeout(PATIENCE);
+    PlaywrightAssertions.setDefaultAssertionTimeout(PATIENCE);
     guard = new PageGuard(page);
   }
 
