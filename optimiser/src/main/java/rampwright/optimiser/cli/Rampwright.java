@@ -2,6 +2,7 @@ package rampwright.optimiser.cli;
 
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.logging.LogManager;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
@@ -43,8 +44,9 @@ public final class Rampwright implements Runnable {
    * @param arguments the command line
    */
   public static void main(String[] arguments) {
-    // the PDF library's logger would say on standard error that nobody listens to it
+    // standard error is for our messages: the PDF libraries would list the fonts they try there
     System.setProperty("slf4j.internal.verbosity", "ERROR");
+    LogManager.getLogManager().reset();
     // JSON is UTF-8 by its standard, and units like N·m and m/s² are lost in a plain locale
     PrintWriter out = new PrintWriter(System.out, true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);
