@@ -1,6 +1,9 @@
 package rampwright.optimiser.sheet;
 
+import java.util.function.Function;
+import java.util.function.ToDoubleFunction;
 import rampwright.vehicle.differential.PlateBuild;
+import rampwright.vehicle.differential.PlateDifferential;
 
 /**
  * What a torque wrench must show before the unit goes into the car.
@@ -16,7 +19,7 @@ import rampwright.vehicle.differential.PlateBuild;
  * </pre>
  *
  * and the unit does not break away at all from {@code k = 1} on. Source: statics of the unit, our
- * derivation from the law of {@link rampwright.vehicle.differential.PlateDifferential}.
+ * derivation from the law of {@link PlateDifferential}.
  *
  * <p>The band is what plate friction scatters, ±15 % (common practice, no source), or half a shim
  * step where that is more.
@@ -43,10 +46,6 @@ public record BenchCheck(
     public boolean breaksAway() {
       return Double.isFinite(value);
     }
-
-    private Target half() {
-      return new Target(value / 2, low / 2, high / 2);
-    }
   }
 
   /**
@@ -56,24 +55,23 @@ public record BenchCheck(
    * @param shimStep change of preload by one shim step (N·m)
    */
   public static BenchCheck of(PlateBuild build, double shimStep) {
-    double preload = build.preload();
-    double half = Math.max(FRICTION_SCATTER * preload, shimStep / 2);
-    Target springs = new Target(preload, Math.max(0, preload - half), preload + half);
+    double half = Math.max(FRICTION_SCATTER * build.preload(), shimStep / 2);
+    PlateDifferential middle = build.law();
+    PlateDifferential weak = scattered(middle, -half, 1 - FRICTION_SCATTER);
+    PlateDifferential strong = scattered(middle, half, 1 + FRICTION_SCATTER);
+    Function<ToDoubleFunction<PlateDifferential>, Target> target =
+        way ->
+            new Target(
+                way.applyAsDouble(middle), way.applyAsDouble(weak), way.applyAsDouble(strong));
     return new BenchCheck(
-        springs.half(),
-        springs,
-        locked(springs, build.law().coastShare()),
-        locked(springs, build.law().driveShare()));
+        target.apply(PlateDifferential::breakawayWheelHeld),
+        target.apply(PlateDifferential::preload),
+        target.apply(law -> law.breakawayPropshaftLocked(true)),
+        target.apply(law -> law.breakawayPropshaftLocked(false)));
   }
 
-  private static Target locked(Target springs, double share) {
-    return new Target(
-        reading(springs.value(), share),
-        reading(springs.low(), share * (1 - FRICTION_SCATTER)),
-        reading(springs.high(), share * (1 + FRICTION_SCATTER)));
-  }
-
-  private static double reading(double preload, double share) {
-    return share < 1 ? preload / (1 - share) : Double.POSITIVE_INFINITY;
+  private static PlateDifferential scattered(PlateDifferential law, double more, double factor) {
+    return new PlateDifferential(
+        Math.max(0, law.preload() + more), factor * law.driveShare(), factor * law.coastShare());
   }
 }

@@ -63,16 +63,6 @@ public record PlateBuild(
     return preload / (2 * facesPerSide * hardware.plateFriction() * hardware.effectiveRadius());
   }
 
-  /** Returns the bench breakaway (N·m) with one wheel held, the other turned, propshaft free. */
-  public double breakawayWheelHeld() {
-    return preload / 2;
-  }
-
-  /** Returns the bench breakaway (N·m) with the propshaft locked and one wheel free. */
-  public double breakawayPropshaftLocked() {
-    return preload;
-  }
-
   /** Returns the total friction area of both packs (m²). */
   public double frictionArea() {
     return 2 * facesPerSide * hardware.faceArea();

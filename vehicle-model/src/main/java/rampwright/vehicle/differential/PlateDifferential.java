@@ -11,8 +11,8 @@ import rampwright.vehicle.input.Quantity;
  *
  * and slide at that difference beyond it.
  *
- * @param preload {@code P}: whole torque difference at zero cage torque (N·m); the bench figure
- *     with the propshaft locked, twice the one with one wheel held and the propshaft free
+ * @param preload {@code P}: whole torque difference at zero cage torque (N·m): twice the bench
+ *     figure with one wheel held, the other turned and the propshaft free
  * @param driveShare {@code k_drive}: locking value added per cage torque on power (-)
  * @param coastShare {@code k_coast}: the same on overrun (-)
  */
@@ -30,6 +30,28 @@ public record PlateDifferential(double preload, double driveShare, double coastS
     PRELOAD.check(preload);
     DRIVE_SHARE.check(driveShare);
     COAST_SHARE.check(coastShare);
+  }
+
+  /**
+   * Returns the bench breakaway (N·m) with one wheel held, the other turned and the propshaft free:
+   * no torque reaches the case, the outputs carry opposite torques.
+   */
+  public double breakawayWheelHeld() {
+    return preload / 2;
+  }
+
+  /**
+   * Returns the bench breakaway (N·m) with the propshaft locked, one wheel free and the other
+   * turned: the free one carries nothing, so the turned one carries the whole difference. What
+   * holds the propshaft loads the ramps with that same torque, so {@code D = P + k D}; infinite
+   * from {@code k = 1} on.
+   *
+   * @param forwards whether the wheel is turned forwards, which works on the coast flanks; else it
+   *     works on the drive flanks
+   */
+  public double breakawayPropshaftLocked(boolean forwards) {
+    double share = forwards ? coastShare : driveShare;
+    return share < 1 ? preload / (1 - share) : Double.POSITIVE_INFINITY;
   }
 
   @Override

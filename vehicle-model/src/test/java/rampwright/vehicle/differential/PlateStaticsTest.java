@@ -150,21 +150,40 @@ class PlateStaticsTest {
 
   /**
    * Bench check, from the balance of the two outputs: with the propshaft free they carry opposite
-   * torques, so half the difference turns the free wheel; with the propshaft locked and one wheel
-   * in the air the other carries nothing, so it takes all of it.
+   * torques, so half the difference turns the free wheel, and that is the torque of one pack.
    */
   @Test
-  void theTwoBenchFiguresDifferByAFactorOfTwo() {
+  void withThePropshaftFreeTheBenchShowsOnePack() {
     PlateBuild build = clutch(104, 72, 0.11, FacePressure.UNIFORM_WEAR, 6, 30);
     double difference = build.law().capacity(0);
     assertThat(difference).isEqualTo(60);
-    assertThat(build.breakawayWheelHeld()).isEqualTo(difference / 2);
-    assertThat(build.breakawayPropshaftLocked()).isEqualTo(difference);
+    assertThat(build.law().breakawayWheelHeld()).isEqualTo(difference / 2);
     double onePack =
         build.facesPerSide()
             * build.hardware().plateFriction()
             * build.hardware().effectiveRadius()
             * build.preloadForce();
-    assertThat(build.breakawayWheelHeld()).isCloseTo(onePack, within(1e-12));
+    assertThat(build.law().breakawayWheelHeld()).isCloseTo(onePack, within(1e-12));
+  }
+
+  /**
+   * With the propshaft locked and one wheel in the air the other takes the whole difference, and
+   * its reaction is a cage torque: negative when the wheel is turned forwards. Without ramps the
+   * two ways of measuring differ by a factor of two, with ramps by more.
+   */
+  @Test
+  void withThePropshaftLockedTheReactionLoadsTheRamps() {
+    PlateDifferential law = new PlateDifferential(60, 0.6, 0.25);
+    double forwards = law.breakawayPropshaftLocked(true);
+    double backwards = law.breakawayPropshaftLocked(false);
+    assertThat(forwards)
+        .isCloseTo(80, within(1e-12))
+        .isCloseTo(law.capacity(-forwards), within(1e-12));
+    assertThat(backwards)
+        .isCloseTo(150, within(1e-12))
+        .isCloseTo(law.capacity(backwards), within(1e-12));
+    PlateDifferential noRamps = new PlateDifferential(60, 0, 0);
+    assertThat(noRamps.breakawayPropshaftLocked(true)).isEqualTo(2 * noRamps.breakawayWheelHeld());
+    assertThat(new PlateDifferential(60, 1, 0).breakawayPropshaftLocked(false)).isInfinite();
   }
 }

@@ -20,7 +20,7 @@ public final class KitSettingFields extends Div {
   private final Checkbox turned = new Checkbox("Turned round");
   private final Select<Integer> faces = new Select<>();
   private final QuantityField preload =
-      new QuantityField("Preload, propshaft locked", PlateDifferential.PRELOAD);
+      new QuantityField("Preload, whole difference", PlateDifferential.PRELOAD);
 
   /** Makes empty fields. */
   public KitSettingFields(Event event) {
