@@ -121,7 +121,10 @@ final class CornerLimit {
       search.slope = Double.NaN;
       found = reach() && byDriver == atDriversLimit();
     }
-    if (!found || next.speed > topSpeed || !drive.signAtMeanSlipIs(start.referenceSign, next)) {
+    if (!found
+        || next.speed <= 0
+        || next.speed > topSpeed
+        || !drive.signAtMeanSlipIs(start.referenceSign, next)) {
       known = 0;
       return false;
     }

@@ -2,6 +2,7 @@ package rampwright.vehicle.lap;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import rampwright.vehicle.Car;
@@ -23,12 +24,16 @@ import rampwright.vehicle.file.FileSource;
 /** Laps of the sample cars that drive other axles. */
 class LayoutLapTest {
   private static Lap lap(String file, DifferentialSet set, Circuit circuit) {
+    return lap(file, set, circuit, LimitForm.DRIVER);
+  }
+
+  private static Lap lap(String file, DifferentialSet set, Circuit circuit, LimitForm form) {
     Car car =
         CarFile.read(
             FileSource.classPath(LayoutLapTest.class.getClassLoader(), "rampwright/samples/"),
             "cars/" + file);
     return LapSolver.solve(
-        new LapRequest(car, set, Conditions.STANDARD, Driver.QUICK, LimitForm.DRIVER, circuit, 5));
+        new LapRequest(car, set, Conditions.STANDARD, Driver.QUICK, form, circuit, 5));
   }
 
   private static Differential law(String name) {
@@ -49,6 +54,18 @@ class LayoutLapTest {
         new DifferentialSet(law(name), OpenDifferential.IDEAL, OpenDifferential.IDEAL);
     check(lap("front_drive_saloon.yaml", set, SampleCircuits.fast()), 100, 118);
     check(lap("front_drive_saloon.yaml", set, SampleCircuits.slow()), 92, 112);
+  }
+
+  /**
+   * A saloon that pushes asks little of its driver; its own limits are no other branch of trims.
+   */
+  @Test
+  void theSaloonsOwnLimitsAreHardlyFasterThanAQuickDriver() {
+    DifferentialSet open = DifferentialSet.rear(OpenDifferential.IDEAL);
+    Lap driver = lap("front_drive_saloon.yaml", open, SampleCircuits.slow());
+    Lap own = lap("front_drive_saloon.yaml", open, SampleCircuits.slow(), LimitForm.CAR);
+    check(own, 92, 112);
+    assertThat(own.time()).isBetween(driver.time() - 0.2, driver.time() + 1e-3);
   }
 
   @ParameterizedTest
