@@ -26,6 +26,9 @@ public final class TrimSolver {
   /** ...and in sideslip (rad); a larger step means another branch. */
   private static final double NEAR_ANGLE = 0.03;
 
+  /** Lateral acceleration (m/s²) that every car sustains. */
+  private static final double GENTLE = 1.5;
+
   private final Car car;
   private final Driveline engineSide;
   private final ForceBalance forces;
@@ -108,7 +111,21 @@ public final class TrimSolver {
    * @return whether such a trim is joined to straight running
    */
   public boolean constantSpeed(double speed, TrimState out) {
-    return driveStart.coasting(speed, work) && driveStart.constantSpeed(work, out);
+    return driveStart.coasting(speed, work) && driveStart.constantSpeed(work, out)
+        || climbTo(speed, out);
+  }
+
+  /**
+   * Follows the branch of constant-speed trims up from a gentle speed: near the cornering limit
+   * there may be no coasting trim to start from, as with a locked front axle in a tight turn.
+   */
+  private boolean climbTo(double speed, TrimState out) {
+    double gentle = Math.sqrt(GENTLE / Math.max(1e-9, Math.abs(forces.curvature)));
+    if (gentle >= speed || !corner.find(gentle, speed, Double.POSITIVE_INFINITY, out)) {
+      return false;
+    }
+    out.speed = speed;
+    return drive.atAcceleration(out, 0) && out.determinantSign == driveStart.referenceSign;
   }
 
   /**
