@@ -11,6 +11,12 @@ import rampwright.vehicle.trim.TrimState;
  * arrives, and lowers the speeds before it.
  */
 final class BackwardPass {
+  /**
+   * Share by which speeds may differ and still count as equal: so near below a cornering limit the
+   * branch of trims turns back, and nothing is gained by another trim.
+   */
+  private static final double SAME_SPEED = 1e-5;
+
   private final Road road;
   private final TrimSolver solver;
   private final Gearbox gearbox;
@@ -117,23 +123,26 @@ final class BackwardPass {
     return Math.min(0, limit.ax);
   }
 
-  /** Lowers the station before; returns the acceleration used, or NaN when it was slow enough. */
-  private double slowDown(int i, int previous, double ax, double after) {
-    if (Double.isNaN(ax)) {
-      return Double.NaN;
-    }
+  /**
+   * Lowers the station before; returns the acceleration used, or NaN when it was slow enough. Where
+   * no brake limit was found, as may happen right at the cornering limit, the speed is held: a
+   * lower station must never be left with a faster one before it.
+   */
+  private double slowDown(int i, int previous, double brakeLimit, double after) {
+    boolean found = !Double.isNaN(brakeLimit);
+    double ax = found ? brakeLimit : 0;
     double energy = profile.speed[i] * profile.speed[i] / 2;
     double ds = road.spacing();
     double slope;
-    if (Double.isNaN(after)) {
+    if (Double.isNaN(after) || !found) {
       double guess = Math.min(Math.sqrt(2 * (energy - ax * ds)), profile.speed[previous]);
-      double before = brakeAt(previous, guess, true);
+      double before = brakeAt(previous, guess, found);
       slope = Double.isNaN(before) ? ax : (ax + before) / 2;
     } else {
       slope = 1.5 * ax - 0.5 * after;
     }
     double reached = Math.sqrt(2 * (energy - Math.min(0, slope) * ds));
-    if (reached >= profile.speed[previous]) {
+    if (reached >= profile.speed[previous] * (1 - SAME_SPEED)) {
       return Double.NaN;
     }
     profile.speed[previous] = reached;

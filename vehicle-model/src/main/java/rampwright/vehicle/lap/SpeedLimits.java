@@ -26,6 +26,9 @@ final class SpeedLimits {
   /** Margin over the straight-line top speed for wind, grade and wheel slip. */
   private static final double TOP_SPEED_MARGIN = 1.2;
 
+  /** Bend of the limit's energy, as a share of it, up to which a parabola describes an apex. */
+  private static final double MOST_BEND = 0.2;
+
   private final Road road;
   private final TrimSolver solver;
   private final double growthMax;
@@ -144,12 +147,15 @@ final class SpeedLimits {
 
   /**
    * Returns where the limit is lowest near an apex, as a share of the spacing after the station:
-   * the vertex of the parabola through the kinetic energies of the station and its neighbours.
+   * the vertex of the parabola through the kinetic energies of the station and its neighbours. A
+   * limit that jumps up beside the station, as where an arc begins without a transition, is no
+   * parabola: the lowest place is then the station.
    */
   double apexOffset(int i) {
     double slope = (energy(after(i)) - energy(before(i))) / 2;
     double bend = energy(after(i)) - 2 * energy(i) + energy(before(i));
-    return bend > 1e-12 ? Math.max(-0.5, Math.min(0.5, -slope / bend)) : 0;
+    boolean smooth = bend > 1e-12 && bend < MOST_BEND * energy(i);
+    return smooth ? Math.max(-0.5, Math.min(0.5, -slope / bend)) : 0;
   }
 
   /** Returns the kinetic energy per mass (m²/s²) of the lowest limit near an apex. */

@@ -19,6 +19,7 @@ final class TraceWriter {
   private final Trace trace;
   private final TrimState state = new TrimState();
   private final TrimState level = new TrimState();
+  private final TrimState fresh = new TrimState();
 
   TraceWriter(Road road, TrimSolver solver, Gearbox gearbox, Driveline driveline, Profile profile) {
     this.road = road;
@@ -98,16 +99,26 @@ final class TraceWriter {
     level.copyFrom(state);
     level.speed = profile.speed[i];
     level.braking = false;
-    if (!solver.atAcceleration(level, ax, gear, state) || !solver.restore(state)) {
-      // at the very limit of speed there is no acceleration to give
-      state.copyFrom(level);
-      boolean trim =
-          solver.restore(state)
-              || solver.constantSpeed(level.speed, level, state) && solver.restore(state);
-      if (!trim) {
-        throw new IllegalStateException("no trim at station " + i);
-      }
+    if (accelerates(ax, gear)) {
+      return;
     }
+    // the station's limit may lie too far from the speed at which it is driven
+    boolean steady = solver.constantSpeed(level.speed, level, fresh);
+    if (steady) {
+      level.copyFrom(fresh);
+    }
+    if (steady && accelerates(ax, gear)) {
+      return;
+    }
+    // at the very limit of speed there is no acceleration to give
+    state.copyFrom(level);
+    if (!solver.restore(state)) {
+      throw new IllegalStateException("no trim at station " + i);
+    }
+  }
+
+  private boolean accelerates(double ax, int gear) {
+    return solver.atAcceleration(level, ax, gear, state) && solver.restore(state);
   }
 
   private void row(int i, int gear) {

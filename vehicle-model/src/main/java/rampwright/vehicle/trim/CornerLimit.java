@@ -22,6 +22,9 @@ final class CornerLimit {
   private static final double GROWTH_TOLERANCE = 1e-6;
   private static final double SPEED_TOLERANCE = 1e-7;
 
+  /** Share of the speed at one point below which the next one's is not sought nearby. */
+  private static final double LEAST_FALL = 0.6;
+
   /** Share of the speed at a fold below which a dip is not followed. */
   private static final double DIP = 0.8;
 
@@ -113,6 +116,12 @@ final class CornerLimit {
       for (int i = 0; i < 4; i++) {
         next.slip[i] += kept.slip[i] - keptBefore.slip[i];
       }
+    }
+    // a limit that falls so fast cannot be extrapolated, and the equations have a mirror image at
+    // negative speed
+    if (next.speed < LEAST_FALL * kept.speed) {
+      known = 0;
+      return false;
     }
     arc.turn();
     boolean found = reach();
