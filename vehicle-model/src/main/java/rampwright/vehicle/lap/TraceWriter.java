@@ -112,9 +112,20 @@ final class TraceWriter {
     }
     // at the very limit of speed there is no acceleration to give
     state.copyFrom(level);
-    if (!solver.restore(state)) {
+    if (!solver.restore(state) && !restoreJustBelow(profile.speed[i])) {
       throw new IllegalStateException("no trim at station " + i);
     }
+  }
+
+  /** At the very limit a trim may be found only by a hair's breadth below the speed. */
+  private boolean restoreJustBelow(double speed) {
+    for (double share = 1e-6; share < 5e-3; share *= 4) {
+      if (solver.constantSpeed(speed * (1 - share), fresh) && solver.restore(fresh)) {
+        state.copyFrom(fresh);
+        return true;
+      }
+    }
+    return false;
   }
 
   private boolean accelerates(double ax, int gear) {
