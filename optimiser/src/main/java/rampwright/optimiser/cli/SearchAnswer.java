@@ -9,6 +9,7 @@ import rampwright.optimiser.event.LimitedMeasure;
 import rampwright.optimiser.kit.KitSetting;
 import rampwright.optimiser.search.AlikeGroup;
 import rampwright.optimiser.search.EvaluatedSetting;
+import rampwright.optimiser.search.GainBand;
 import rampwright.optimiser.search.LimitCheck;
 import rampwright.optimiser.search.SearchProgress;
 import rampwright.optimiser.search.SearchRequest;
@@ -23,12 +24,21 @@ import rampwright.vehicle.input.Quantity;
  * @param request what was asked
  * @param result what was found
  * @param current the setting that is in the car now; empty when the kit does not build it
+ * @param gain how far the best's gain over it can be trusted; empty when no setting meets the
+ *     limits
  */
 record SearchAnswer(
-    SearchRequest request, SearchResult result, Optional<EvaluatedSetting> current) {
+    SearchRequest request,
+    SearchResult result,
+    Optional<EvaluatedSetting> current,
+    Optional<GainBand> gain) {
   static SearchAnswer of(SearchRequest request, SettingEvaluator evaluator, SearchResult result) {
     Optional<KitSetting> fitted = request.event().current().kitSetting();
-    return new SearchAnswer(request, result, fitted.map(evaluator::evaluate));
+    Optional<GainBand> gain =
+        result.feasible()
+            ? Optional.of(GainBand.of(request.event(), result.best().setting()))
+            : Optional.empty();
+    return new SearchAnswer(request, result, fitted.map(evaluator::evaluate), gain);
   }
 
   Map<String, Object> document() {
@@ -41,6 +51,7 @@ record SearchAnswer(
     search.put("meetsLimits", result.feasible());
     search.put("best", setting(result.best()).map());
     search.put("current", current.map(this::setting).orElse(null));
+    search.put("gain", gain.map(SearchAnswer::gain).orElse(null));
     search.put("alternatives", result.alike().stream().map(this::alternative).toList());
     search.put("history", result.history().stream().map(SearchAnswer::progress).toList());
     return new JsonMap()
@@ -65,6 +76,21 @@ record SearchAnswer(
         .put("highestPreloadNm", group.highestPreload())
         .put("settings", group.settings())
         .map();
+  }
+
+  private static Map<String, Object> gain(GainBand band) {
+    return new JsonMap()
+        .put("gainS", band.gain())
+        .put("lowS", band.low())
+        .put("highS", band.high())
+        .put("measurableS", band.measurable())
+        .put("verdict", band.verdict().label())
+        .put("shares", band.shares().stream().map(SearchAnswer::share).toList())
+        .map();
+  }
+
+  private static Map<String, Object> share(GainBand.Share share) {
+    return new JsonMap().put("source", share.source()).put("halfWidthS", share.seconds()).map();
   }
 
   /** A limit carries its unit in its name, which is that of the event's file. */
@@ -103,10 +129,28 @@ record SearchAnswer(
       }
     }
     out.append(table);
+    gain.ifPresent(band -> out.append('\n').append(gainText(band)));
     if (!result.best().limits().isEmpty()) {
       out.append("\nlimits of the best\n").append(limits());
     }
     return out.toString();
+  }
+
+  private static String gainText(GainBand band) {
+    TextTable shares = new TextTable();
+    for (GainBand.Share share : band.shares()) {
+      shares.row("  " + share.source(), "±" + Shown.number(share.seconds(), 3), "s");
+    }
+    return "gain over the current setting "
+        + Shown.signed(band.gain(), 3)
+        + " s, between "
+        + Shown.signed(band.low(), 3)
+        + " and "
+        + Shown.signed(band.high(), 3)
+        + " s: "
+        + band.verdict().label()
+        + "\n"
+        + shares;
   }
 
   private static void row(TextTable table, String label, EvaluatedSetting setting, String note) {

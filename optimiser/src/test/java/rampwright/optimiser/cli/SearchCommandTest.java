@@ -39,11 +39,11 @@ class SearchCommandTest {
   @Test
   void theBestMeetsTheLimitsIsNotSlowerThanTheCurrentAndIsTheSameOnTwoThreads() throws IOException {
     limits("{min_preload_nm: 20, max_drive_share: 0.6}");
-    CommandRun run = search("--evaluations", "8", "--seed", "7", "--threads", "1", "--json");
+    CommandRun run = search("--evaluations", "6", "--seed", "7", "--threads", "1", "--json");
     assertThat(run.code()).isZero();
     JsonNode search = run.json().get("search");
     assertThat(search.get("seed").intValue()).isEqualTo(7);
-    assertThat(search.get("evaluations").intValue()).isBetween(2, 8);
+    assertThat(search.get("evaluations").intValue()).isBetween(2, 6);
     assertThat(search.get("settingsOfTheKit").intValue()).isGreaterThanOrEqualTo(2000);
     JsonNode best = search.get("best");
     assertThat(best.get("lapTimeS").doubleValue())
@@ -59,7 +59,17 @@ class SearchCommandTest {
     assertThat(best.get("limits")).allMatch(limit -> limit.get("met").booleanValue());
     assertThat(best.get("limits").get(1).get("value").doubleValue())
         .isCloseTo(best.get("driveShare").doubleValue(), within(1e-12));
-    CommandRun again = search("--evaluations", "8", "--seed", "7", "--threads", "2", "--json");
+    JsonNode gain = search.get("gain");
+    assertThat(gain.get("gainS").doubleValue())
+        .isCloseTo(
+            search.get("current").get("lapTimeS").doubleValue()
+                - best.get("lapTimeS").doubleValue(),
+            within(1e-9));
+    assertThat(gain.get("lowS").doubleValue()).isLessThan(gain.get("gainS").doubleValue());
+    assertThat(gain.get("shares"))
+        .extracting(share -> share.get("source").textValue())
+        .contains("plate friction ±15 %", "grip ±3 %");
+    CommandRun again = search("--evaluations", "6", "--seed", "7", "--threads", "2", "--json");
     assertThat(again.out()).isEqualTo(run.out());
   }
 
@@ -74,6 +84,7 @@ class SearchCommandTest {
                 + " one of them in the event\\.\\R");
     JsonNode search = new CommandRun(3, run.out(), "").json().get("search");
     assertThat(search.get("meetsLimits").booleanValue()).isFalse();
+    assertThat(search.get("gain").isNull()).isTrue();
     assertThat(search.get("best").get("limits"))
         .anyMatch(limit -> !limit.get("met").booleanValue());
   }
@@ -88,6 +99,8 @@ class SearchCommandTest {
         .contains("evaluations, seed 1\n")
         .containsPattern("(?m)^current: ring set 55/75, 4 faces per side, .* s +meets the limits$")
         .containsPattern("(?m)^best: ring set .* s +meets the limits$")
+        .containsPattern("(?m)^gain over the current setting \\+?\\d\\.\\d{3} s, between .* s: ")
+        .containsPattern("(?m)^  grip ±3 % +±\\d\\.\\d{3} +s$")
         .containsPattern("(?m)^  preload +[\\d.]+ +at least +20\\.000 +N·m +met$");
   }
 
