@@ -5,7 +5,9 @@ import static rampwright.vehicle.circuit.Segment.Corner.degrees;
 import java.util.List;
 import rampwright.vehicle.circuit.Segment.Straight;
 
-/** The segment lists behind the sample circuits. Names, places and layouts are invented. */
+/**
+ * The segment lists and hills behind the sample circuits. Names, places and layouts are invented.
+ */
 public final class SampleCircuits {
   /** Spacing of the stations (m). */
   private static final double SPACING = 2;
@@ -76,6 +78,67 @@ public final class SampleCircuits {
                 new Straight(330)),
             4000,
             SPACING));
+  }
+
+  /**
+   * Returns the hilly sample: anticlockwise, with a crest, a banked and an adversely cambered
+   * corner and a stretch that is damp on the left.
+   */
+  public static Circuit hilly() {
+    Circuit flat =
+        rounded(
+            SegmentLine.closed(
+                "Thornbeck",
+                List.of(
+                    new Straight(300),
+                    degrees(45, 110, 30),
+                    new Straight(160),
+                    degrees(70, -60, 30),
+                    new Straight(220),
+                    degrees(22, 150, 20),
+                    new Straight(260),
+                    degrees(110, 75, 50),
+                    new Straight(180),
+                    degrees(55, -70, 30),
+                    new Straight(150),
+                    degrees(60, 155, 40),
+                    new Straight(240)),
+                2600,
+                SPACING));
+    return new Circuit(
+        flat.name(),
+        true,
+        flat.length(),
+        flat.stations().stream().map(SampleCircuits::withHills).toList());
+  }
+
+  private static Station withHills(Station flat) {
+    double s = flat.distance();
+    double wave = 2 * Math.PI / 2600;
+    // heights 8, 4 and 3 m in waves of the whole, a third and a fifth of the lap
+    double slope =
+        8 * wave * Math.cos(wave * s)
+            + 12 * wave * Math.cos(3 * wave * s + 1)
+            + 15 * wave * Math.cos(5 * wave * s + 2);
+    double bankDegrees = 6 * hump(s, 2180, 2500) - 2.5 * hump(s, 1760, 1960);
+    return new Station(
+        s,
+        flat.curvature(),
+        flat.x(),
+        flat.y(),
+        Math.toRadians(rounded(Math.toDegrees(Math.atan(slope)), 1e4)),
+        Math.toRadians(rounded(bankDegrees, 1e4)),
+        rounded(1 - 0.1 * hump(s, 760, 1060), 1e4),
+        1);
+  }
+
+  /** Rises from 0 to 1 and falls again between two distances (m), with even slope. */
+  private static double hump(double s, double from, double to) {
+    if (s <= from || s >= to) {
+      return 0;
+    }
+    double edge = Math.min(1, Math.min(s - from, to - s) / 60);
+    return edge * edge * (3 - 2 * edge);
   }
 
   /** Fewer digits make a file that a person can read; the position stays good to a micrometre. */

@@ -60,7 +60,10 @@ public enum Figure {
 
   /** Returns a value of this figure with its unit. */
   public String shown(double value) {
-    String number = String.format(Locale.ROOT, "%." + decimals + "f", value);
+    double scale = Math.pow(10, decimals);
+    // plus zero, lest a small negative number shows as -0
+    double rounded = Math.rint(value * scale) / scale + 0.0;
+    String number = String.format(Locale.ROOT, "%." + decimals + "f", rounded);
     return unit.isEmpty() ? number : number + " " + unit;
   }
 }

@@ -25,7 +25,8 @@ class SampleCircuitsTest {
   static Stream<Arguments> samples() {
     return Stream.of(
         arguments("circuits/kestrelwick.csv", SampleCircuits.slow(), 1, 2300, 11),
-        arguments("circuits/velmoor.csv", SampleCircuits.fast(), -1, 4000, 60));
+        arguments("circuits/velmoor.csv", SampleCircuits.fast(), -1, 4000, 60),
+        arguments("circuits/thornbeck.csv", SampleCircuits.hilly(), 1, 2600, 22));
   }
 
   @ParameterizedTest(name = "{0}")

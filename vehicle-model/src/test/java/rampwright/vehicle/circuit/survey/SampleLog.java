@@ -191,17 +191,9 @@ public final class SampleLog {
     return new double[] {a.x() + share * (b.x() - a.x()), a.y() + share * (b.y() - a.y())};
   }
 
-  /** Inverts the projection by a few corrections with the radii of a sphere. */
   private static String geographic(double x, double y) {
-    LocalFrame frame = new LocalFrame(LATITUDE, LONGITUDE, 0);
-    double latitude = LATITUDE;
-    double longitude = LONGITUDE;
-    for (int step = 0; step < 6; step++) {
-      LocalFrame.Geocentric place = LocalFrame.geocentric(latitude, longitude, 0);
-      latitude += (y - frame.north(place)) / 6.37e6;
-      longitude += (x - frame.east(place)) / (6.37e6 * Math.cos(LATITUDE));
-    }
-    return number(",%.8f,%.8f", Math.toDegrees(latitude), Math.toDegrees(longitude));
+    double[] place = OceanPlace.of(LATITUDE, LONGITUDE, x, y);
+    return number(",%.8f,%.8f", Math.toDegrees(place[0]), Math.toDegrees(place[1]));
   }
 
   private static String number(String format, Object... values) {
