@@ -48,7 +48,7 @@ class LayoutLapTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"open", "plate", "brake", "spool"})
+  @CsvSource({"open", "brake", "spool"})
   void theFrontDrivenSaloonLapsBothCircuits(String name) {
     DifferentialSet set =
         new DifferentialSet(law(name), OpenDifferential.IDEAL, OpenDifferential.IDEAL);
