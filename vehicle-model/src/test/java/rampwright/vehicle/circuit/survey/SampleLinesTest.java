@@ -55,7 +55,12 @@ class SampleLinesTest {
   @Test
   void theSurveyedLineGivesTheCircuitBack() throws IOException {
     // centimetres every 6 m: 0.005 m over a third of the smoothing length squared
-    agrees(imported(SampleLines.XY), SampleCircuits.fast(), 8e-4);
+    ImportedCircuit imported = imported(SampleLines.XY);
+    agrees(imported, SampleCircuits.fast(), 8e-4);
+    assertThat(imported.report().warnings())
+        .containsExactly(
+            "The points lie about 6.0 m apart: a smoothing length of 24 m or more keeps their"
+                + " scatter out of the curvature.");
   }
 
   @Test
