@@ -1,6 +1,5 @@
 package rampwright.optimiser.cli;
 
-import java.util.Locale;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
 import rampwright.vehicle.balance.LapAnalysis;
@@ -34,9 +33,23 @@ record SolvedLaps(
         circuit, setting, driver, LapAnalysis.report(driver), car, LapAnalysis.report(car));
   }
 
-  /** Returns a name for a file about one of the two laps. */
+  /** Returns a name for a file about one of the two laps; no other lap has the same. */
   String fileName(String form) {
-    String all = circuit.name() + "_" + setting.name() + "_" + form;
-    return all.toLowerCase(Locale.ROOT).replaceAll("[^\\p{L}\\p{N}_]+", "-") + ".csv";
+    return safe(circuit.name()) + "_" + safe(setting.name()) + "_" + form + ".csv";
+  }
+
+  /** Blanks become hyphens, and what a file system may not like is told by its code. */
+  private static String safe(String name) {
+    StringBuilder safe = new StringBuilder();
+    name.codePoints()
+        .forEach(
+            c -> {
+              if (Character.isLetterOrDigit(c)) {
+                safe.appendCodePoint(c);
+              } else {
+                safe.append(c == ' ' ? "-" : "~" + Integer.toHexString(c));
+              }
+            });
+    return safe.toString();
   }
 }

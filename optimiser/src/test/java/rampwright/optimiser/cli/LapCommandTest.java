@@ -63,7 +63,7 @@ class LapCommandTest {
     JsonNode lap = run.json().get("laps").get(0);
     assertThat(lap.get("setting").textValue()).isEqualTo("as raced");
     Path file = Path.of(lap.get("traceFile").textValue());
-    assertThat(file).isEqualTo(traces.resolve("kestrelwick_as-raced_driver.csv"));
+    assertThat(file).isEqualTo(traces.resolve("Kestrelwick_as-raced_driver.csv"));
     assertThat(Path.of(lap.get("carLimitsTraceFile").textValue())).exists();
     List<String> lines = Files.readAllLines(file);
     assertThat(lines).hasSize(1 + 2300 / 5);
