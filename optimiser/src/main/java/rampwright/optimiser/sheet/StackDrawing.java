@@ -16,7 +16,7 @@ final class StackDrawing {
   private static final double AXIS = 45.5;
   private static final double MARKS = 39.4;
   private static final double FIRST = 27;
-  private static final double LAST = 98;
+  private static final double LAST = 82;
   private static final double WIDEST_PLATE = 5;
 
   /** Above this number of plates only every fifth is numbered. */
