@@ -11,6 +11,7 @@ import com.vaadin.flow.router.Menu;
 import com.vaadin.flow.router.PageTitle;
 import com.vaadin.flow.router.Route;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import rampwright.optimiser.event.Event;
 import rampwright.optimiser.event.NamedSetting;
@@ -77,7 +78,7 @@ class CompareView extends Div implements BeforeEnterObserver {
     List<String> names =
         enter.getLocation().getQueryParameters().getParameters().getOrDefault(SETTING, List.of());
     List<NamedSetting> wanted = new ArrayList<>();
-    for (String name : names) {
+    for (String name : new LinkedHashSet<>(names)) {
       event.settings().stream().filter(s -> s.name().equals(name)).forEach(wanted::add);
     }
     if (wanted.size() < 2) {

@@ -30,6 +30,10 @@ final class SettingActions extends Div {
   }
 
   private static void compare(StoredRun run, KitSetting setting, EventStore events) {
+    if (events.open().event().current().kitSetting().equals(Optional.of(setting))) {
+      tell("This is the setting that is in the car: there is nothing to compare.");
+      return;
+    }
     add(run, setting, events)
         .ifPresent(
             name ->
