@@ -16,6 +16,7 @@ import rampwright.optimiser.search.SearchRequest;
 import rampwright.optimiser.search.SearchResult;
 import rampwright.optimiser.search.SettingEvaluator;
 import rampwright.optimiser.search.SettingSpace;
+import rampwright.optimiser.search.UnsolvedSetting;
 import rampwright.vehicle.input.Quantity;
 
 /**
@@ -53,11 +54,19 @@ record SearchAnswer(
     search.put("current", current.map(this::setting).orElse(null));
     search.put("gain", gain.map(SearchAnswer::gain).orElse(null));
     search.put("alternatives", result.alike().stream().map(this::alternative).toList());
+    search.put("unsolved", result.unsolved().stream().map(this::unsolved).toList());
     search.put("history", result.history().stream().map(SearchAnswer::progress).toList());
     return new JsonMap()
         .put("event", event().name())
         .put("version", ProgramVersion.text())
         .put("search", search)
+        .map();
+  }
+
+  private Map<String, Object> unsolved(UnsolvedSetting failed) {
+    return new JsonMap()
+        .putAll(SettingWords.document(event(), failed.setting()))
+        .put("reason", failed.reason())
         .map();
   }
 
@@ -132,6 +141,10 @@ record SearchAnswer(
     gain.ifPresent(band -> out.append('\n').append(gainText(band)));
     if (!result.best().limits().isEmpty()) {
       out.append("\nlimits of the best\n").append(limits());
+    }
+    if (!result.unsolved().isEmpty()) {
+      out.append("\n").append(result.unsolved().size()).append(" laps could not be solved, ");
+      out.append("the first: ").append(result.unsolved().get(0).reason()).append('\n');
     }
     return out.toString();
   }

@@ -25,9 +25,10 @@ final class EvaluationLedger {
   private final Comparator<EvaluatedSetting> order;
   private final Map<Integer, Merit> merits = new HashMap<>();
   private final List<EvaluatedSetting> settings = new ArrayList<>();
+  private final List<UnsolvedSetting> unsolved = new ArrayList<>();
   private final List<SearchProgress> history = new ArrayList<>();
   private EvaluatedSetting best;
-  private InvalidInput failure;
+  private RuntimeException failure;
   private int generation;
   private boolean cancelled;
 
@@ -79,6 +80,11 @@ final class EvaluationLedger {
     return List.copyOf(settings);
   }
 
+  /** Returns the settings whose laps could not be computed. */
+  List<UnsolvedSetting> unsolved() {
+    return List.copyOf(unsolved);
+  }
+
   /** Returns the progress after each generation. */
   List<SearchProgress> history() {
     return List.copyOf(history);
@@ -88,6 +94,7 @@ final class EvaluationLedger {
    * Returns the best setting; of equally good ones the one that takes the shortest change.
    *
    * @throws InvalidInput when the car could not follow a circuit with any setting
+   * @throws IllegalStateException when no lap could be solved
    */
   EvaluatedSetting best() {
     if (best == null) {
@@ -131,7 +138,7 @@ final class EvaluationLedger {
   }
 
   /** What became of one law: its settings, or why it has none, or neither after a cancel. */
-  private record Outcome(List<EvaluatedSetting> settings, InvalidInput failure) {
+  private record Outcome(List<EvaluatedSetting> settings, RuntimeException failure) {
     static final Outcome CANCELLED = new Outcome(List.of(), null);
   }
 
@@ -146,8 +153,8 @@ final class EvaluationLedger {
               .map(index -> problem.evaluate().apply(problem.space().setting(index)))
               .toList(),
           null);
-    } catch (InvalidInput e) {
-      // a law with which the car cannot follow the line ranks behind all others
+    } catch (InvalidInput | IllegalStateException e) {
+      // one lap that cannot be solved must not cost the answer of all others
       return new Outcome(List.of(), e);
     }
   }
@@ -160,6 +167,8 @@ final class EvaluationLedger {
     if (outcome.failure() != null) {
       failure = failure == null ? outcome.failure() : failure;
       merits.put(law, Merit.WORST);
+      String reason = String.valueOf(outcome.failure().getMessage());
+      unsolved.add(new UnsolvedSetting(problem.space().setting(law), reason));
       return;
     }
     for (EvaluatedSetting setting : outcome.settings()) {

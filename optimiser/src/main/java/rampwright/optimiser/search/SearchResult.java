@@ -15,6 +15,8 @@ import java.util.List;
  * @param alike settings that a stopwatch could not tell from the best, the best among them, grouped
  *     by ring set and faces, the cheapest change from the current setting first; empty when none
  *     meets all limits
+ * @param unsolved settings whose laps could not be computed, one per law, in the order of the
+ *     search
  * @param history the progress after each generation
  */
 public record SearchResult(
@@ -25,10 +27,13 @@ public record SearchResult(
     boolean feasible,
     boolean cancelled,
     List<AlikeGroup> alike,
+    List<UnsolvedSetting> unsolved,
     List<SearchProgress> history) {
   /** Copies the lists. */
   public SearchResult {
     alike = List.copyOf(alike);
+    // results stored before laps could be left out do not name any
+    unsolved = unsolved == null ? List.of() : List.copyOf(unsolved);
     history = List.copyOf(history);
   }
 

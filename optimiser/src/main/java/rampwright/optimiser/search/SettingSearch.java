@@ -14,7 +14,8 @@ import rampwright.vehicle.input.InvalidInput;
  * do.
  *
  * <p>The answer depends on event, seed and budget alone, not on the number of threads. Two equally
- * good settings are told apart by the time of the change from the current one.
+ * good settings are told apart by the time of the change from the current one. A setting whose lap
+ * cannot be computed ranks last and is named in the answer.
  */
 public final class SettingSearch {
   /** Share of the budget for the genetic part. */
@@ -103,6 +104,7 @@ public final class SettingSearch {
         best.feasible(),
         ledger.cancelled(),
         AlikeGroup.of(best, ledger.settings(), problem),
+        ledger.unsolved(),
         ledger.history());
   }
 }

@@ -1,6 +1,7 @@
 package rampwright.optimiser.search;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.ArrayList;
@@ -141,18 +142,39 @@ class SettingSearchTest {
   }
 
   @Test
-  void lawsWithWhichTheCarCannotFollowTheLineRankLast() {
+  void settingsWhoseLapsCannotBeSolvedRankLastAndAreNamed() {
     SearchProblem problem =
         SearchProblems.of(
             law -> {
-              if (law.driveShare() > 0.05) {
+              if (law.driveShare() > 0.4) {
                 throw InvalidInput.of("curvature", "too tight", "one that the car can follow", "");
+              }
+              if (law.driveShare() > 0.05) {
+                throw new IllegalStateException("no trim at station 3");
               }
               return SearchProblems.valleys(law);
             },
             SettingSearchTest::none);
     SearchResult result = run(problem, 2, 300);
     assertThat(result.best().law().driveShare()).isLessThanOrEqualTo(0.05);
+    assertThat(result.unsolved())
+        .extracting(UnsolvedSetting::reason)
+        .contains(
+            "no trim at station 3",
+            "The curvature (too tight) must be one that the car can follow.");
+    assertThat(result.unsolved())
+        .allMatch(u -> SearchProblems.KIT.build(u.setting()).law().driveShare() > 0.05);
+  }
+
+  @Test
+  void anEventInWhichNoLapCanBeSolvedHasNoAnswer() {
+    SearchProblem problem =
+        SearchProblems.of(
+            law -> {
+              throw InvalidInput.of("curvature", "too tight", "one that the car can follow", "");
+            },
+            SettingSearchTest::none);
+    assertThatExceptionOfType(InvalidInput.class).isThrownBy(() -> run(problem, 2, 30));
   }
 
   @Test

@@ -45,6 +45,9 @@ final class ResultPanel extends Div {
                 + result.evaluations()
                 + " evaluations · seed "
                 + result.seed()
+                + (result.unsolved().isEmpty()
+                    ? ""
+                    : " · " + result.unsolved().size() + " laps could not be solved")
                 + (result.cancelled() ? " · ended early: the best so far" : "")),
         new SettingActions(run, best.setting(), events),
         limits(best.limits()));
