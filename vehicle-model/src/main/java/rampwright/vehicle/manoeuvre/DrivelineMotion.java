@@ -13,6 +13,9 @@ import rampwright.vehicle.driveline.DriveLayout;
  * wheels of an axle have the same inertia. A workspace.
  */
 final class DrivelineMotion {
+  /** Speed difference (rad/s) from which a unit begins to slide. */
+  private static final double APART = 1e-9;
+
   /** Units of the driven positions, centre first. */
   final List<FrictionUnit> units;
 
@@ -102,6 +105,21 @@ final class DrivelineMotion {
         centre.law.wheelBrakeTorque(Math.max(frontMean, rearMean), Math.min(frontMean, rearMean));
     resisting[axle] += brake / 2;
     resisting[axle + 1] += brake / 2;
+  }
+
+  /**
+   * Sets the output speeds of a unit that begins to slide apart by next to nothing, so that the
+   * event that ends the sliding does not lie at its very beginning.
+   */
+  void part(FrictionUnit unit, double[] y) {
+    double half = unit.direction() * APART / 2;
+    for (int i = 0; i < 4; i++) {
+      boolean own = unit == centre || i < 2 == (unit == front);
+      boolean first = unit == centre ? i < 2 : i % 2 == 0;
+      if (own) {
+        y[MotionState.WHEEL + i] += first ? half : -half;
+      }
+    }
   }
 
   /** Makes the output speeds of a unit exactly equal. */

@@ -76,6 +76,16 @@ final class FrictionUnit {
     }
   }
 
+  /** Returns 1 when the left (front) output is the faster one while sliding, -1 for the other. */
+  int direction() {
+    return direction;
+  }
+
+  /** Whether the speeds last seen were equal. */
+  boolean atEqualSpeeds(double equalWithin) {
+    return Math.abs(speedDifference) <= equalWithin;
+  }
+
   /** Starts to slide the way in which the torques push. */
   void breakAway() {
     direction = friction() > 0 ? 1 : -1;

@@ -98,6 +98,8 @@ public final class MotionSolver {
         unit.decide(EQUAL_SPEEDS);
         if (unit.sticking()) {
           motion.driveline.join(unit, y);
+        } else if (unit.atEqualSpeeds(EQUAL_SPEEDS)) {
+          motion.driveline.part(unit, y);
         }
       }
     }
@@ -112,6 +114,9 @@ public final class MotionSolver {
         changed.breakAway();
       } else {
         changed.decide(EQUAL_SPEEDS);
+      }
+      if (!changed.sticking()) {
+        motion.driveline.part(changed, y);
       }
     }
 

@@ -14,12 +14,18 @@ import rampwright.vehicle.differential.Differential;
 import rampwright.vehicle.differential.DifferentialSet;
 import rampwright.vehicle.differential.OpenDifferential;
 import rampwright.vehicle.differential.PlateDifferential;
+import rampwright.vehicle.differential.PlateFriction;
+import rampwright.vehicle.differential.PreloadPath;
+import rampwright.vehicle.differential.RefinedPlateDifferential;
 import rampwright.vehicle.differential.Spool;
 import rampwright.vehicle.differential.TorqueSensingDifferential;
 import rampwright.vehicle.differential.ViscousDifferential;
 import rampwright.vehicle.driveline.DriveLayout;
+import rampwright.vehicle.file.FileSource;
+import rampwright.vehicle.file.TyreFile;
 import rampwright.vehicle.trim.Trim;
 import rampwright.vehicle.trim.Trims;
+import rampwright.vehicle.tyre.Tyre;
 
 /**
  * The time-domain model, written apart from the trim equations, settles on the trims: two
@@ -30,10 +36,21 @@ class SettlingTest {
       List.of(
           OpenDifferential.IDEAL,
           new PlateDifferential(60, 0.3, 0.15),
+          new RefinedPlateDifferential(
+              new PlateDifferential(60, 0.3, 0.15),
+              0.03,
+              PreloadPath.SERIES,
+              new PlateFriction(0.8, 3, 110, 80, 0.002)),
           new Spool(),
           new ViscousDifferential(60, 4, 0.6),
           new TorqueSensingDifferential(10, 2.2, 1.6),
           new BrakeLock(0.01, 9000, 500));
+
+  /** Magic Formula tyre, so that both tyre models are driven. */
+  private static final Tyre ROAD_RADIAL =
+      TyreFile.read(
+          FileSource.classPath(SettlingTest.class.getClassLoader(), "rampwright/samples/"),
+          "tyres/road_radial.yaml");
 
   @Test
   void theMotionSettlesOnTheTrims() {
@@ -43,13 +60,17 @@ class SettlingTest {
         settled += settle(layout, law);
       }
     }
-    assertThat(settled).isGreaterThanOrEqualTo(60);
+    assertThat(settled).isGreaterThanOrEqualTo(150);
   }
 
   private static int settle(DriveLayout layout, Differential law) {
     CarBuilder b = new CarBuilder();
     b.layout = layout;
     b.frontTorqueShare = 0.45;
+    if (layout == DriveLayout.FRONT) {
+      b.front = ROAD_RADIAL;
+      b.rear = ROAD_RADIAL;
+    }
     DifferentialSet set = new DifferentialSet(law, law, law);
     Trims trims = new Trims(b.build(), Conditions.STANDARD, set);
     MotionSolver solver =
