@@ -9,6 +9,12 @@ final class BranchStart {
   /** Lateral acceleration (m/s²) that one step of bending adds at most. */
   private static final double STEP = 2.5;
 
+  /**
+   * Kinematic steer (rad) that one step of bending adds at most: a larger first step at walking
+   * speed leads to a car that slides sideways.
+   */
+  private static final double STEER_STEP = 0.05;
+
   private static final int MOST_HALVINGS = 8;
 
   private final Equilibrium equilibrium;
@@ -46,7 +52,9 @@ final class BranchStart {
     ForceBalance forces = equilibrium.forces;
     double curvature = forces.curvature;
     double gradient = forces.curvatureGradient;
-    double step = Math.min(1, STEP / Math.max(1e-9, speed * speed * Math.abs(curvature)));
+    double bend = Math.max(1e-9, Math.abs(curvature));
+    double step =
+        Math.min(1, Math.min(STEP / (speed * speed), STEER_STEP / forces.wheelbase) / bend);
     straight(speed);
     forces.bend(0, 0);
     boolean found = solve(last);
