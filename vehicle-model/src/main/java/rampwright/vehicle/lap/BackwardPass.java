@@ -17,6 +17,9 @@ final class BackwardPass {
    */
   private static final double SAME_SPEED = 1e-5;
 
+  /** Lateral acceleration (m/s²) below which braking changes slowly along the road. */
+  private static final double STRAIGHT = 1.0;
+
   private final Road road;
   private final TrimSolver solver;
   private final Gearbox gearbox;
@@ -27,6 +30,7 @@ final class BackwardPass {
   private final TrimState level = new TrimState();
   private final TrimState limit = new TrimState();
   private final TrimState held = new TrimState();
+  private final TrimState peeked = new TrimState();
   private int gear;
   private LapLimit reason;
 
@@ -86,20 +90,25 @@ final class BackwardPass {
     double offset = limits.apexOffset(i);
     double energy = limits.apexEnergy(i);
     int before = offset > 0 ? i : previous;
-    double distance = (offset > 0 ? offset : 1 + offset) * road.spacing();
+    double distance = offset > 0 ? offset : road.step(previous) + offset;
     double ax = brakeAt(before, Math.sqrt(2 * energy), false);
     if (Double.isNaN(ax)) {
       return;
     }
     double reached = Math.sqrt(2 * (energy - 0.5 * ax * distance));
-    profile.speed[before] = Math.min(profile.speed[before], reached);
+    if (reached < profile.speed[before]) {
+      profile.speed[before] = reached;
+      profile.limit[before] = LapLimit.CORNERING;
+    }
   }
 
   /** Whether the car can slow down as the profile asks, which needs no search for the limit. */
   private boolean slowsEnough(int i, int previous) {
     double speed = profile.speed[i];
     double asked =
-        (speed * speed - profile.speed[previous] * profile.speed[previous]) / 2 / road.spacing();
+        (speed * speed - profile.speed[previous] * profile.speed[previous])
+            / 2
+            / road.step(previous);
     solver.place(road, i);
     profile.load(i, held);
     held.braking = false;
@@ -132,14 +141,14 @@ final class BackwardPass {
     boolean found = !Double.isNaN(brakeLimit);
     double ax = found ? brakeLimit : 0;
     double energy = profile.speed[i] * profile.speed[i] / 2;
-    double ds = road.spacing();
+    double ds = road.step(previous);
     double slope;
     if (Double.isNaN(after) || !found) {
       double guess = Math.min(Math.sqrt(2 * (energy - ax * ds)), profile.speed[previous]);
       double before = brakeAt(previous, guess, found);
       slope = Double.isNaN(before) ? ax : (ax + before) / 2;
     } else {
-      slope = 1.5 * ax - 0.5 * after;
+      slope = corrected(previous, energy, ax, ax + 0.5 * (ax - after) * ds / road.step(i), ds);
     }
     double reached = Math.sqrt(2 * (energy - Math.min(0, slope) * ds));
     if (reached >= profile.speed[previous] * (1 - SAME_SPEED)) {
@@ -147,6 +156,22 @@ final class BackwardPass {
     }
     profile.speed[previous] = reached;
     return ax;
+  }
+
+  /** Trapezoidal rule with a look at the point before, at the speed predicted there. */
+  private double corrected(int previous, double energy, double ax, double predicted, double ds) {
+    double speed = Math.sqrt(2 * (energy - Math.min(0, predicted) * ds));
+    if (speed * speed * Math.abs(road.curvature(previous)) < STRAIGHT) {
+      return predicted;
+    }
+    solver.place(road, previous);
+    boolean seen =
+        solver.peekBrakeLimit(
+            speed,
+            gearbox.best(solver.rollingCageSpeed(speed)),
+            growthMax(previous, speed),
+            peeked);
+    return seen ? (ax + Math.min(0, peeked.ax)) / 2 : predicted;
   }
 
   private double growthMax(int i, double speed) {

@@ -88,12 +88,11 @@ final class ForwardPass {
       step(i, limits.speed(i), true);
       before = Double.NaN;
       shiftLeft = 0;
-      int next = i + 1 < road.size() ? i + 1 : 0;
-      double ax = driveLimitAhead(next, Math.sqrt(2 * energy));
-      return energy + 0.5 * Math.max(0, ax) * (1 - offset) * road.spacing();
+      double ax = driveLimitAhead(road.next(i), Math.sqrt(2 * energy));
+      return energy + 0.5 * Math.max(0, ax) * (road.step(i) - offset);
     }
     double ax = driveLimitAhead(i, Math.sqrt(2 * energy));
-    double reached = energy - 0.5 * Math.max(0, ax) * offset * road.spacing();
+    double reached = energy - 0.5 * Math.max(0, ax) * offset;
     return step(i, Math.min(limits.speed(i), Math.sqrt(2 * reached)), true);
   }
 
@@ -135,7 +134,15 @@ final class ForwardPass {
     energyBefore = energy;
     double ax = limit.ax;
     double cageSpeed = limit.cageSpeed;
-    double slope = Double.isNaN(before) ? startSlope(i, energy, ax) : 1.5 * ax - 0.5 * before;
+    double slope;
+    if (Double.isNaN(before)) {
+      slope = startSlope(i, energy, ax);
+    } else {
+      slope = ax + 0.5 * (ax - before) * road.step(i) / road.step(road.previous(i));
+      if (why != TrimLimit.TORQUE) {
+        slope = corrected(i, energy, ax, slope);
+      }
+    }
     before = ax;
     return shiftWithin(i, energy, slope, cageSpeed);
   }
@@ -155,7 +162,7 @@ final class ForwardPass {
     profile.save(i, level, gear, LapLimit.CORNERING);
     before = Double.NaN;
     axBefore = Double.NaN;
-    int next = i + 1 < road.size() ? i + 1 : 0;
+    int next = road.next(i);
     if (limits.binds(next) && limits.speed(next) <= level.speed) {
       return energy;
     }
@@ -172,7 +179,7 @@ final class ForwardPass {
    * @return the energy at the threshold, or the one given when there is no threshold below it
    */
   private double holdThreshold(int i, double energy, double axAbove) {
-    double below = energyBefore + Math.min(0, axAbove) * road.spacing();
+    double below = energyBefore + Math.min(0, axAbove) * road.step(road.previous(i));
     double middle = (axBefore + axAbove) / 2;
     double above = energy;
     if (below < LEAST_ENERGY || !(driveLimitAhead(i, Math.sqrt(2 * below)) > middle)) {
@@ -201,7 +208,7 @@ final class ForwardPass {
       limit.speed = speed;
     }
     profile.save(i, limit, gear, LapLimit.SHIFT);
-    return roll(speed * speed / 2, limit.ax, road.spacing());
+    return roll(speed * speed / 2, limit.ax, road.step(i));
   }
 
   private static LapLimit reason(TrimLimit why) {
@@ -214,14 +221,13 @@ final class ForwardPass {
 
   /** Mean acceleration over the next interval by the trapezoidal rule, for lack of a past. */
   private double startSlope(int i, double energy, double ax) {
-    int next = i + 1 < road.size() ? i + 1 : 0;
-    if (next == 0 && !road.closed()) {
+    int next = road.next(i);
+    if (next == i) {
       return ax;
     }
     double speed =
         Math.min(
-            Math.sqrt(2 * Math.max(energy + ax * road.spacing(), LEAST_ENERGY)),
-            limits.speed(next));
+            Math.sqrt(2 * Math.max(energy + ax * road.step(i), LEAST_ENERGY)), limits.speed(next));
     solver.place(road, next);
     if (solver.nextDriveLimit(speed, level, gear, growthMax, limit) == null) {
       return ax;
@@ -229,9 +235,25 @@ final class ForwardPass {
     return (ax + limit.ax) / 2;
   }
 
+  /**
+   * Mean acceleration over the next interval by the trapezoidal rule, from a look at the next point
+   * with the speed that a predicted acceleration leads to.
+   */
+  private double corrected(int i, double energy, double ax, double predicted) {
+    int next = road.next(i);
+    double energyThere = energy + predicted * road.step(i);
+    double speed = Math.sqrt(2 * Math.max(energyThere, LEAST_ENERGY));
+    if (next == i || limits.binds(next) && speed >= limits.speed(next)) {
+      return predicted;
+    }
+    solver.place(road, next);
+    boolean seen = solver.peekDriveLimit(speed, gear, growthMax, limit);
+    return seen ? (ax + limit.ax) / 2 : predicted;
+  }
+
   /** Takes the next gear when its shift speed lies within the interval. */
   private double shiftWithin(int i, double energy, double slope, double cageSpeed) {
-    double ds = road.spacing();
+    double ds = road.step(i);
     double next = Math.max(energy + slope * ds, LEAST_ENERGY);
     double then = cageSpeed * Math.sqrt(next / energy);
     double shiftSpeed = gearbox.upshiftSpeed(gear);

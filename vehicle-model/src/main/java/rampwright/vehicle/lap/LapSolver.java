@@ -29,7 +29,7 @@ public final class LapSolver {
    * @throws InvalidInput when the car cannot follow the line at all
    */
   public static Lap solve(LapRequest request) {
-    Road road = Road.of(request.circuit(), request.conditions(), request.spacing());
+    Road road = Road.refined(request.circuit(), request.conditions(), request.spacing());
     TrimSolver solver =
         new TrimSolver(request.car(), request.conditions(), request.differentials());
     double growthMax =
@@ -49,6 +49,6 @@ public final class LapSolver {
     }
     new BackwardPass(road, solver, gearbox, limits, profile, request).run(start);
     TraceWriter writer = new TraceWriter(road, solver, gearbox, request.car().driveline(), profile);
-    return new Lap(request, writer.write(), road, writer.trace());
+    return new Lap(request, writer.write(), road.stationsOnly(), writer.trace());
   }
 }

@@ -48,6 +48,10 @@ final class Profile {
     System.arraycopy(unknowns, k + 5, state.slip, 0, 4);
   }
 
+  boolean braking(int i) {
+    return braking[i];
+  }
+
   double ax(int i) {
     return unknowns[i * WIDTH + 2];
   }

@@ -88,7 +88,7 @@ final class SpeedLimits {
       }
       if (!solved) {
         throw InvalidInput.value(
-            "curvature at " + Math.round(i * road.spacing()) + " m",
+            "curvature at " + Math.round(road.distance(i)) + " m",
             road.curvature(i),
             "1/m",
             "one that the car can follow",
@@ -142,38 +142,49 @@ final class SpeedLimits {
 
   /** Returns whether no neighbour of a station has a lower limit. */
   boolean isApex(int i) {
-    return binds(i) && speed(i) <= speed(before(i)) && speed(i) <= speed(after(i));
+    return binds(i) && speed(i) <= speed(road.previous(i)) && speed(i) <= speed(road.next(i));
   }
 
   /**
-   * Returns where the limit is lowest near an apex, as a share of the spacing after the station:
-   * the vertex of the parabola through the kinetic energies of the station and its neighbours. A
-   * limit that jumps up beside the station, as where an arc begins without a transition, is no
-   * parabola: the lowest place is then the station.
+   * Returns how far (m) behind an apex's point the limit is lowest, negative before it: the vertex
+   * of the parabola through the kinetic energies of the point and its neighbours. A limit that
+   * jumps up beside the point, as where an arc begins without a transition, is no parabola: the
+   * lowest place is then the point.
    */
   double apexOffset(int i) {
-    double slope = (energy(after(i)) - energy(before(i))) / 2;
-    double bend = energy(after(i)) - 2 * energy(i) + energy(before(i));
-    boolean smooth = bend > 1e-12 && bend < MOST_BEND * energy(i);
-    return smooth ? Math.max(-0.5, Math.min(0.5, -slope / bend)) : 0;
+    double bend = bend(i);
+    double before = road.step(road.previous(i));
+    double after = road.step(i);
+    if (bend <= 1e-12 || bend * before * after > MOST_BEND * energy(i)) {
+      return 0;
+    }
+    return Math.max(-before / 2, Math.min(after / 2, -slope(i) / bend));
   }
 
   /** Returns the kinetic energy per mass (m²/s²) of the lowest limit near an apex. */
   double apexEnergy(int i) {
-    double slope = (energy(after(i)) - energy(before(i))) / 2;
-    return energy(i) + 0.5 * slope * apexOffset(i);
+    return energy(i) + 0.5 * slope(i) * apexOffset(i);
+  }
+
+  /** Slope at a point of the parabola through the energies of it and its neighbours. */
+  private double slope(int i) {
+    double before = road.step(road.previous(i));
+    double after = road.step(i);
+    double rise = (energy(road.next(i)) - energy(i)) / after;
+    double fall = (energy(i) - energy(road.previous(i))) / before;
+    return (rise * before + fall * after) / (before + after);
+  }
+
+  private double bend(int i) {
+    double before = road.step(road.previous(i));
+    double after = road.step(i);
+    double rise = (energy(road.next(i)) - energy(i)) / after;
+    double fall = (energy(i) - energy(road.previous(i))) / before;
+    return 2 * (rise - fall) / (before + after);
   }
 
   private double energy(int i) {
     return 0.5 * found.speed[i] * found.speed[i];
-  }
-
-  private int before(int i) {
-    return i > 0 ? i - 1 : road.closed() ? road.size() - 1 : 0;
-  }
-
-  private int after(int i) {
-    return i < road.size() - 1 ? i + 1 : road.closed() ? 0 : i;
   }
 
   void load(int i, TrimState out) {

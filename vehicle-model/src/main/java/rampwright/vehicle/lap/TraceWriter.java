@@ -17,6 +17,8 @@ final class TraceWriter {
   private final Driveline driveline;
   private final Profile profile;
   private final Trace trace;
+  private final double[] ax;
+  private final boolean[] braking;
   private final TrimState state = new TrimState();
   private final TrimState level = new TrimState();
   private final TrimState fresh = new TrimState();
@@ -27,7 +29,9 @@ final class TraceWriter {
     this.gearbox = gearbox;
     this.driveline = driveline;
     this.profile = profile;
-    this.trace = new Trace(road.size());
+    this.trace = new Trace(road.stations());
+    this.ax = new double[road.size()];
+    this.braking = new boolean[road.size()];
   }
 
   Trace trace() {
@@ -37,6 +41,11 @@ final class TraceWriter {
   /** Writes every station and returns the lap time (s). */
   double write() {
     for (int i = 0; i < road.size(); i++) {
+      ax[i] = profile.limit[i] == LapLimit.CORNERING ? asked(i) : profile.ax(i);
+      braking[i] = profile.braking(i);
+    }
+    for (int station = 0; station < road.stations(); station++) {
+      int i = road.pointOf(station);
       solver.place(road, i);
       profile.load(i, state);
       int gear = profile.gear[i];
@@ -44,33 +53,41 @@ final class TraceWriter {
         gear = gearbox.best(solver.rollingCageSpeed(profile.speed[i]));
         follow(i, gear);
       }
-      row(i, gear);
+      row(station, i, gear);
+      ax[i] = state.ax;
+      braking[i] = state.brakeTorque > 0;
     }
+    return times();
+  }
+
+  private double times() {
     double time = 0;
-    int intervals = road.closed() ? road.size() : road.size() - 1;
-    for (int i = 0; i < intervals; i++) {
-      set(Channel.TIME, i, time);
-      time += interval(i, i + 1 < road.size() ? i + 1 : 0);
-    }
-    if (!road.closed()) {
-      set(Channel.TIME, intervals, time);
+    int station = 0;
+    for (int i = 0; i < road.size(); i++) {
+      if (station < road.stations() && road.pointOf(station) == i) {
+        set(Channel.TIME, station++, time);
+      }
+      int next = road.next(i);
+      if (next != i) {
+        time += interval(i, next);
+      }
     }
     return time;
   }
 
   /**
-   * Time (s) from one station to the next. Where drive turns into braking between the two, both
+   * Time (s) from one point to the next. Where drive turns into braking between the two, both
    * accelerations are held up to the point where they meet; elsewhere the kinetic energy is taken
    * as the cubic through both ends and the time integrated by Simpson's rule.
    */
   private double interval(int i, int j) {
-    double ds = road.spacing();
+    double ds = road.step(i);
     double from = profile.speed[i];
     double to = profile.speed[j];
-    double axFrom = trace.get(Channel.AX, i);
-    double axTo = trace.get(Channel.AX, j);
+    double axFrom = ax[i];
+    double axTo = ax[j];
     double gain = (to * to - from * from) / 2;
-    if (axFrom > 0 && axTo < 0 && trace.get(Channel.BRAKE_TORQUE, j) > 0) {
+    if (axFrom > 0 && axTo < 0 && braking[j]) {
       double share = (gain - axTo * ds) / ((axFrom - axTo) * ds);
       if (share > 0 && share < 1) {
         double top = Math.sqrt(from * from + 2 * axFrom * share * ds);
@@ -82,24 +99,22 @@ final class TraceWriter {
     return ds / 6 * (1 / from + 4 / Math.sqrt(Math.max(least, middle)) + 1 / to);
   }
 
-  /**
-   * Solves for the acceleration that the neighbouring speeds ask for, starting from the trim of the
-   * profile.
-   */
+  /** Acceleration (m/s²) that the neighbouring speeds ask for. */
+  private double asked(int i) {
+    int before = road.previous(i);
+    int after = road.next(i);
+    double distance = (before == i ? 0 : road.step(before)) + (after == i ? 0 : road.step(i));
+    double fast = profile.speed[after];
+    double slow = profile.speed[before];
+    return (fast * fast - slow * slow) / 2 / distance;
+  }
+
+  /** Solves for the acceleration asked for, starting from the trim of the profile. */
   private void follow(int i, int gear) {
-    int n = road.size();
-    int before = road.closed() ? Math.floorMod(i - 1, n) : Math.max(0, i - 1);
-    int after = road.closed() ? Math.floorMod(i + 1, n) : Math.min(n - 1, i + 1);
-    int intervals = road.closed() || i > 0 && i < n - 1 ? 2 : 1;
-    double energyChange =
-        (profile.speed[after] * profile.speed[after]
-                - profile.speed[before] * profile.speed[before])
-            / 2;
-    double ax = energyChange / (intervals * road.spacing());
     level.copyFrom(state);
     level.speed = profile.speed[i];
     level.braking = false;
-    if (accelerates(ax, gear)) {
+    if (accelerates(ax[i], gear)) {
       return;
     }
     // the station's limit may lie too far from the speed at which it is driven
@@ -107,7 +122,7 @@ final class TraceWriter {
     if (steady) {
       level.copyFrom(fresh);
     }
-    if (steady && accelerates(ax, gear)) {
+    if (steady && accelerates(ax[i], gear)) {
       return;
     }
     // at the very limit of speed there is no acceleration to give
@@ -128,26 +143,27 @@ final class TraceWriter {
     return false;
   }
 
-  private boolean accelerates(double ax, int gear) {
-    return solver.atAcceleration(level, ax, gear, state) && solver.restore(state);
+  private boolean accelerates(double wanted, int gear) {
+    return solver.atAcceleration(level, wanted, gear, state) && solver.restore(state);
   }
 
-  private void row(int i, int gear) {
+  private void row(int station, int point, int gear) {
+    int i = station;
     TrimResults r = solver.results();
-    double speed = profile.speed[i];
-    set(Channel.DISTANCE, i, i * road.spacing());
+    double speed = profile.speed[point];
+    set(Channel.DISTANCE, i, road.distance(point));
     set(Channel.SPEED, i, speed);
-    set(Channel.CURVATURE, i, road.curvature(i));
-    set(Channel.CURVATURE_GRADIENT, i, road.curvatureGradient(i));
+    set(Channel.CURVATURE, i, road.curvature(point));
+    set(Channel.CURVATURE_GRADIENT, i, road.curvatureGradient(point));
     set(Channel.AX, i, state.ax);
-    set(Channel.AY, i, speed * speed * road.curvature(i));
+    set(Channel.AY, i, speed * speed * road.curvature(point));
     set(Channel.SIDESLIP, i, state.sideslip);
     set(Channel.STEER, i, state.steer);
     set(Channel.CAGE_TORQUE, i, state.cageTorque);
     set(Channel.FULL_TORQUE, i, driveline.fullTorque(gear, state.cageSpeed));
     set(Channel.BRAKE_TORQUE, i, state.brakeTorque);
     set(Channel.GEAR, i, gear);
-    set(Channel.LIMIT, i, profile.limit[i].ordinal());
+    set(Channel.LIMIT, i, profile.limit[point].ordinal());
     set(Channel.SIGMA, i, r.sigma());
     set(Channel.CONTROL, i, r.control());
     set(Channel.YAW_MOMENT, i, r.yawMoment());

@@ -19,6 +19,9 @@ final class CornerLimit {
    */
   private static final double FLAT = 1e-5;
 
+  /** Share of the speed below which a step has left the branch: the equations are even in speed. */
+  private static final double LEAST_SHARE = 0.5;
+
   private static final double GROWTH_TOLERANCE = 1e-6;
   private static final double SPEED_TOLERANCE = 1e-7;
 
@@ -130,10 +133,8 @@ final class CornerLimit {
       search.slope = Double.NaN;
       found = reach() && byDriver == atDriversLimit();
     }
-    if (!found
-        || next.speed <= 0
-        || next.speed > topSpeed
-        || !drive.signAtMeanSlipIs(start.referenceSign, next)) {
+    boolean near = found && next.speed < topSpeed && next.speed > LEAST_SHARE * kept.speed;
+    if (!near || !drive.signAtMeanSlipIs(start.referenceSign, next)) {
       known = 0;
       return false;
     }
@@ -212,7 +213,9 @@ final class CornerLimit {
   private boolean advance(double step) {
     next.copyFrom(last);
     arc.move(next, step);
-    return drive.alongArc(next, arc, step) && drive.signAtMeanSlipIs(start.referenceSign, next);
+    return drive.alongArc(next, arc, step)
+        && next.speed > LEAST_SHARE * last.speed
+        && drive.signAtMeanSlipIs(start.referenceSign, next);
   }
 
   /** Ends the climb at the fold or the driver's limit, between the last two states. */

@@ -134,11 +134,22 @@ final class LimitTracker {
       double speed, SlipMarch.TorqueCap cap, double largestGrowth, int sign, TrimState out) {
     double lateral = speed * speed * equilibrium.forces.curvature;
     boolean due = sinceAudit >= AUDIT && Math.abs(lateral) > STRAIGHT;
-    if (known == 0 || due) {
+    if (due || !peek(speed, cap, largestGrowth, sign, out)) {
+      known = 0;
       return null;
     }
-    growthMax = largestGrowth;
     sinceAudit++;
+    keep(trial);
+    return reason;
+  }
+
+  /** Looks at the limit at a point without going there; returns whether it could be followed. */
+  boolean peek(
+      double speed, SlipMarch.TorqueCap cap, double largestGrowth, int sign, TrimState out) {
+    if (known == 0) {
+      return false;
+    }
+    growthMax = largestGrowth;
     predict(speed);
     boolean found =
         switch (kind) {
@@ -159,16 +170,28 @@ final class LimitTracker {
         };
     boolean steady =
         found
-            && (kind == Kind.TORQUE || cap.headroom(trial) >= 0)
+            && (kind == Kind.TORQUE || cap.headroom(trial) >= 0 && !nearDip())
             && Math.abs(trial.meanSlip - last.meanSlip) < LARGEST_STEP
             && pattern() == pattern;
-    if (!steady) {
-      known = 0;
-      return null;
+    if (steady) {
+      out.copyFrom(trial);
     }
-    keep(trial);
-    out.copyFrom(trial);
-    return reason;
+    return steady;
+  }
+
+  /**
+   * Whether the branch may dip before this limit: a wheel is past its peak and friction links it to
+   * its neighbour. The limit may then jump from one side of the dip to the other.
+   */
+  private boolean nearDip() {
+    for (DifferentialEquation differential : equilibrium.driveline.differentials) {
+      if (differential.state != DifferentialEquation.State.FRICTIONLESS
+          && differential.capacity < Double.POSITIVE_INFINITY
+          && equilibrium.someWheelSpent()) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private boolean reach(ArcSearch.Miss miss, double tolerance) {

@@ -215,6 +215,23 @@ public final class TrimSolver {
     return searched;
   }
 
+  /**
+   * Looks at the drive limit a little further on, without leaving the point where it was found
+   * last.
+   *
+   * @return whether the limit could be followed there
+   */
+  public boolean peekDriveLimit(double speed, int gear, double growthMax, TrimState out) {
+    fullLoad.gear = gear;
+    return driveTracker.peek(speed, fullLoad, growthMax, driveStart.referenceSign, out);
+  }
+
+  /** Looks at the brake limit a little further back, like {@link #peekDriveLimit}. */
+  public boolean peekBrakeLimit(double speed, int gear, double growthMax, TrimState out) {
+    brake.input = engineSide.overrunTorque(gear, rollingCageSpeed(speed));
+    return brakeTracker.peek(speed, fullBrakes, growthMax, brakeSign, out);
+  }
+
   /** Finds the strongest braking at the next point, like {@link #nextDriveLimit}. */
   public TrimLimit nextBrakeLimit(
       double speed, TrimState level, int gear, double growthMax, TrimState out) {
