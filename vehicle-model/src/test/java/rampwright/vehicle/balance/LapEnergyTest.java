@@ -116,7 +116,7 @@ class LapEnergyTest {
   }
 
   /**
-   * On a closed lap the car ends as fast as it starts. The tolerance is that of 2 m stations in
+   * On a closed lap the car ends as fast as it starts. The tolerance is that of 1 m stations in
    * hairpins of 12 m radius, where the acceleration changes by 8 m/s² from station to station; what
    * is dissipated is checked far more closely at each station above.
    */

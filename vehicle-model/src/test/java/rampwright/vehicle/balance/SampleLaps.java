@@ -32,7 +32,7 @@ final class SampleLaps {
 
   /** A lap of the slow circuit of another sample car with all of its differentials. */
   static Lap of(String car, DifferentialSet differentials) {
-    return lap(car(car), SampleCircuits.slow(), differentials, 2);
+    return lap(car(car), SampleCircuits.slow(), differentials, 1);
   }
 
   static Lap fast(Differential rear) {
