@@ -1,16 +1,10 @@
 package rampwright.optimiser;
 
-import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatExceptionOfType;
 
 import java.io.IOException;
 import java.io.InputStream;
-import java.net.URISyntaxException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.List;
-import java.util.stream.Stream;
-import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import rampwright.optimiser.event.EventFile;
@@ -45,27 +39,6 @@ class BadInputTest {
     }
     try (InputStream in = SAMPLES.open(path)) {
       CircuitImport.read(path, in, ImportOptions.defaults());
-    }
-  }
-
-  @Test
-  void everyBadInputIsInTheIndexOnce() throws IOException, URISyntaxException {
-    Path folder =
-        Path.of(
-            SampleFiles.class
-                .getResource("/" + SampleFiles.BASE + SampleFiles.FAILURES + "index.csv")
-                .toURI());
-    try (Stream<Path> files = Files.list(folder.getParent())) {
-      List<String> names =
-          files
-              .filter(Files::isRegularFile)
-              .map(file -> SampleFiles.FAILURES + file.getFileName())
-              .filter(path -> !path.endsWith("/index.csv"))
-              .toList();
-      assertThat(badInputs())
-          .extracting(BadInput::path)
-          .containsExactlyInAnyOrderElementsOf(names)
-          .hasSizeGreaterThan(12);
     }
   }
 }

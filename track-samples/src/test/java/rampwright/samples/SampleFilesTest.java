@@ -35,6 +35,27 @@ class SampleFilesTest {
   }
 
   @Test
+  void theIndexOfBadInputsNamesEveryFileOnce() throws IOException, URISyntaxException {
+    Path index =
+        Path.of(
+            SampleFiles.class
+                .getResource("/" + SampleFiles.BASE + SampleFiles.FAILURES + "index.csv")
+                .toURI());
+    List<String> files;
+    try (Stream<Path> list = Files.list(index.getParent())) {
+      files =
+          list.filter(Files::isRegularFile)
+              .map(file -> SampleFiles.FAILURES + file.getFileName())
+              .filter(path -> !path.endsWith("/index.csv"))
+              .toList();
+    }
+    assertThat(SampleFiles.badInputs())
+        .extracting(BadInput::path)
+        .containsExactlyInAnyOrderElementsOf(files)
+        .hasSizeGreaterThan(12);
+  }
+
+  @Test
   void aSampleOpens() throws IOException {
     assertThat(SampleFiles.list("circuit")).hasSizeGreaterThanOrEqualTo(2);
     for (SampleFile sample : SampleFiles.list()) {
