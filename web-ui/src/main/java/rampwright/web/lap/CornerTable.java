@@ -87,7 +87,7 @@ final class CornerTable extends TreeGrid<CornerTable.Row> {
     addColumn(row -> text(row, corner, phase, decimals))
         .setHeader(header)
         .setTextAlign(ColumnTextAlign.END)
-        .setWidth("5.2rem")
+        .setWidth("4.95rem")
         .setFlexGrow(1);
   }
 
