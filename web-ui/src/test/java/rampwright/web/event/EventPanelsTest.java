@@ -95,12 +95,12 @@ class EventPanelsTest {
   void aSettingThatTheKitCannotBuildIsToldAndNotStored() {
     show(new SettingsPanel(before, events::change));
     _get(TextField.class, spec -> spec.withLabel("Name")).setValue("soft");
-    field("Preload, propshaft locked").setValue("41");
+    field("Preload, whole difference").setValue("41");
     press("Save setting");
     assertThat(message()).contains("(41 N·m)").contains("in steps of 5");
     assertThat(events.open().event()).isEqualTo(before);
 
-    field("Preload, propshaft locked").setValue("45");
+    field("Preload, whole difference").setValue("45");
     press("Save setting");
     assertThat(events.open().event().setting("soft").kitSetting().orElseThrow().preload())
         .isEqualTo(45);
