@@ -1,11 +1,12 @@
 package rampwright.optimiser.search;
 
-import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import rampwright.optimiser.kit.PartsKit.PreloadRange;
 import rampwright.vehicle.differential.PlateDifferential;
@@ -87,24 +88,35 @@ final class Candidates {
     return nearest;
   }
 
-  /**
-   * Returns the neighbours of a setting: the next two preload steps either way, and the stacks with
-   * the nearest locking shares at its own preload.
-   */
-  List<Integer> neighbours(int index) {
-    List<Integer> neighbours = new ArrayList<>();
+  /** Returns the settings of each stack (fitting and faces) that may be proposed, by preload. */
+  List<List<Integer>> byStack() {
+    return List.copyOf(
+        IntStream.of(laws)
+            .boxed()
+            .collect(
+                Collectors.groupingBy(
+                    i -> i / space.steps(), TreeMap::new, Collectors.<Integer>toList()))
+            .values());
+  }
+
+  /** Returns the settings of the same stack at higher (1) or lower (-1) preload, nearest first. */
+  IntStream line(int index, int direction) {
     int own = space.firstAlike(index);
     int step = space.step(own);
-    for (int change : List.of(1, -1, 2, -2)) {
-      if (step + change >= 0 && step + change < space.steps()) {
-        neighbours.add(own + change);
-      }
-    }
-    for (int stack : nearestStacks.computeIfAbsent(own - step, this::nearestTo)) {
-      neighbours.add(stack + step);
-    }
-    neighbours.removeIf(neighbour -> !allowed[neighbour]);
-    return neighbours;
+    int more = direction > 0 ? space.steps() - 1 - step : step;
+    return IntStream.rangeClosed(1, more)
+        .map(change -> own + direction * change)
+        .filter(other -> allowed[other]);
+  }
+
+  /** Returns the stacks with the nearest locking shares, at the preload of a setting. */
+  List<Integer> similar(int index) {
+    int own = space.firstAlike(index);
+    int step = space.step(own);
+    return nearestStacks.computeIfAbsent(own - step, this::nearestTo).stream()
+        .map(stack -> stack + step)
+        .filter(other -> allowed[other])
+        .toList();
   }
 
   private List<Integer> nearestTo(int stack) {

@@ -13,8 +13,11 @@ import io.jenetics.engine.EvolutionResult;
 import io.jenetics.util.ISeq;
 import io.jenetics.util.RandomRegistry;
 import io.jenetics.util.Seq;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import java.util.random.RandomGeneratorFactory;
+import java.util.stream.Stream;
 
 /**
  * The genetic search over three whole numbers: ring set as fitted, faces per side, preload step. A
@@ -59,10 +62,17 @@ final class GeneticSearch {
             .interceptor(EvolutionResult.toUniquePopulation(this::randomGenes))
             .executor(Runnable::run)
             .build();
-    List<Genotype<IntegerGene>> first =
-        problem.current().map(problem.space()::index).map(this::genes).stream().toList();
+    List<Genotype<IntegerGene>> first = bestOfStacks().map(this::genes).toList();
     Patience patience = new Patience(mostEvaluations);
     engine.stream(first).limit(patience::goOn).forEach(result -> {});
+  }
+
+  /** Returns the best known setting of each of the best stacks. */
+  private Stream<Integer> bestOfStacks() {
+    Set<Integer> seen = new HashSet<>();
+    return ledger.ranked().stream()
+        .filter(index -> seen.add(index / problem.space().steps()))
+        .limit(POPULATION / 2);
   }
 
   /** Closes each generation and decides whether there is another. */

@@ -8,17 +8,20 @@ import rampwright.vehicle.input.InvalidInput;
 /**
  * Searches a kit for the setting with the least lap time that meets all limits of the event.
  *
- * <p>Where the budget allows it every setting is computed. Else a genetic search spends the first
- * half of the budget and a local search around the best settings the rest. Settings that break a
- * limit on the parts themselves (preload, locking share) are left out from the start, unless all
- * do.
+ * <p>Where the budget allows it every setting is computed. Else a sample of every ring set and
+ * number of faces and a genetic search that starts from its best spend the first half of the
+ * budget, and a local search around the best settings the rest. Settings that break a limit on the
+ * parts themselves (preload, locking share) are left out from the start, unless all do.
  *
  * <p>The answer depends on event, seed and budget alone, not on the number of threads. Two equally
  * good settings are told apart by the time of the change from the current one. A setting whose lap
  * cannot be computed ranks last and is named in the answer.
  */
 public final class SettingSearch {
-  /** Share of the budget for the genetic part. */
+  /** Share of the budget for the first sample. */
+  private static final double SAMPLE_SHARE = 0.3;
+
+  /** Share of the budget that is spent when the genetic part ends. */
   private static final double GENETIC_SHARE = 0.5;
 
   /** Laws per batch of an enumeration. */
@@ -60,6 +63,7 @@ public final class SettingSearch {
       if (method == SearchMethod.ENUMERATED) {
         enumerate(laws, ledger);
       } else {
+        new FirstSample(candidates, ledger).run(seed, (int) Math.ceil(limit * SAMPLE_SHARE));
         new GeneticSearch(problem, candidates, ledger)
             .run(seed, (int) Math.ceil(limit * GENETIC_SHARE));
         new NeighbourSearch(candidates, ledger).run();
