@@ -4,10 +4,21 @@ import java.util.Arrays;
 
 /** A fixed linear function of the results of {@link ForceBalance}; only its terms are stored. */
 final class LinearForm {
+  /** Terms are written out up to this number, because most forms have two. */
+  private static final int WRITTEN_OUT = 2;
+
+  private final int first;
+  private final int second;
+  private final double firstFactor;
+  private final double secondFactor;
   private final int[] index;
   private final double[] factor;
 
   private LinearForm(int[] index, double[] factor) {
+    this.first = index.length > 0 ? index[0] : 0;
+    this.second = index.length > 1 ? index[1] : 0;
+    this.firstFactor = index.length > 0 ? factor[0] : 0;
+    this.secondFactor = index.length > 1 ? factor[1] : 0;
     this.index = index;
     this.factor = factor;
   }
@@ -30,8 +41,8 @@ final class LinearForm {
 
   /** Returns the value for results or for their changes. */
   double apply(double[] values) {
-    double sum = 0;
-    for (int k = 0; k < index.length; k++) {
+    double sum = firstFactor * values[first] + secondFactor * values[second];
+    for (int k = WRITTEN_OUT; k < index.length; k++) {
       sum += factor[k] * values[index[k]];
     }
     return sum;

@@ -111,7 +111,7 @@ public record PeakSlipTyre(
       double angle = q * Math.atan(u);
       gX = Math.sin(angle) / rho;
       hX = (Math.cos(angle) * q * longitudinal.scale() / (1 + u * u) - gX) / rho2;
-      if (lateral.equals(longitudinal)) {
+      if (lateral.shape() == longitudinal.shape() && lateral.scale() == longitudinal.scale()) {
         gY = gX;
         hY = hX;
       } else {
