@@ -4,7 +4,9 @@ package rampwright.optimiser.search;
 public enum SearchMethod {
   /** Every setting that may be proposed was computed: the answer is the best there is. */
   ENUMERATED("every setting was computed"),
-  /** A genetic search with a local search at its end: the best of those that were computed. */
+  /**
+   * A sample, a genetic search and a local search at its end: the best of those that were computed.
+   */
   GENETIC("genetic search");
 
   private final String label;
