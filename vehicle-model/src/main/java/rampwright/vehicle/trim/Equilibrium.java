@@ -41,6 +41,9 @@ final class Equilibrium {
   /** The same where the correction may change sticking into sliding, whose slopes differ. */
   private static final double CLOSE_AT_EDGE = 1e-11;
 
+  /** Angles (rad) and slips (-) up to which a correction may be the last. */
+  private static final double SMALL_CORRECTION = 1e-4;
+
   /** Scaled residual beyond which no iteration is tried. */
   private static final double HOPELESS = 1e6;
 
@@ -131,13 +134,22 @@ final class Equilibrium {
       if (!system.solve(size, last ? 2 : 1)) {
         return false;
       }
-      if (last) {
+      if (last && correctionIsSmall()) {
         finish(state);
         return true;
       }
       step(state);
     }
     return false;
+  }
+
+  /** Whether the correction is small enough for its square not to matter, even near a fold. */
+  private boolean correctionIsSmall() {
+    double largest = Math.max(Math.abs(solution(0)), Math.abs(solution(1)));
+    for (int j = 3; j < size; j++) {
+      largest = Math.max(largest, Math.abs(solution(j)));
+    }
+    return largest < SMALL_CORRECTION;
   }
 
   private boolean atEdge() {
