@@ -74,6 +74,8 @@ class ImportView extends Div {
         new Upload(UploadHandler.inMemory((metadata, bytes) -> take(metadata.fileName(), bytes)));
     upload.setMaxFiles(1);
     upload.setMaxFileSize(LARGEST);
+    // one file at a time, and another after it, also when the first was bad
+    upload.addAllFinishedListener(event -> upload.clearFileList());
     upload.addFileRejectedListener(
         rejected ->
             result.show(
