@@ -37,6 +37,20 @@ class BadUploadIT extends BrowserTest {
   }
 
   @Test
+  void anotherFileIsReadAfterABadOne() throws IOException {
+    for (String name : new String[] {"first_of_two.csv", "second_of_two.csv"}) {
+      Path file = folder.resolve(name);
+      Files.writeString(file, "Time [s],Speed [km/h]\n0,100\n1,101\n2,102\n3,103\n4,104\n");
+      if (name.startsWith("first")) {
+        upload(file);
+      } else {
+        page.locator("input[type=file]").setInputFiles(file);
+      }
+      assertThat(page.locator(".rw-notice-error[role=alert]")).containsText(name);
+    }
+  }
+
+  @Test
   void anotherKindOfFileIsRefused() throws IOException {
     Path file = folder.resolve("lap_of_a_bad_day.csv");
     byte[] noise = new byte[5000];
